@@ -1,0 +1,5 @@
+/** Real-gas properties. Knows no vessel and no time. */
+@NullMarked
+package org.gasmargin.gas;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,5 @@
+/** Vessels, walls, materials and heat-transfer correlations. */
+@NullMarked
+package org.gasmargin.vessel;
+
+import org.jspecify.annotations.NullMarked;
