@@ -8,8 +8,11 @@ import java.util.List;
  *
  * @param judgedOn bounds or modelled path
  * @param findings never empty
+ * @param packs the rule packs that were used, in the order of use
+ * @param notApplied rules that were looked at and do not concern a step, with the reason
  */
-public record Judgement(JudgeOn judgedOn, List<Finding> findings) {
+public record Judgement(
+    JudgeOn judgedOn, List<Finding> findings, List<PackUsed> packs, List<NotApplied> notApplied) {
 
   /** Sorts worst first and keeps the order of steps within one verdict. */
   public Judgement {
@@ -17,6 +20,8 @@ public record Judgement(JudgeOn judgedOn, List<Finding> findings) {
       throw new IllegalArgumentException("a judgement without findings would look like a pass");
     }
     findings = findings.stream().sorted(Comparator.comparing(Finding::verdict).reversed()).toList();
+    packs = List.copyOf(packs);
+    notApplied = List.copyOf(notApplied);
   }
 
   /** The worst of the findings. */
