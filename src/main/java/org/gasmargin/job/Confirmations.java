@@ -1,0 +1,56 @@
+package org.gasmargin.job;
+
+import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import org.gasmargin.units.NearestName;
+import org.gasmargin.units.Place;
+
+/**
+ * The user's answers to the reader's questions: paths of values that are unusual and meant. A
+ * confirmation of something that is not in question is refused, so that none is left behind to
+ * silence a later slip.
+ */
+final class Confirmations {
+  static final int MOST = 100;
+
+  private final Map<String, Place> given = new LinkedHashMap<>();
+  private final Set<String> asked = new LinkedHashSet<>();
+  private final Issues issues;
+
+  Confirmations(Issues issues) {
+    this.issues = issues;
+  }
+
+  /** Reads the list of paths. */
+  void read(Value list) {
+    for (Value item : Lists.items(list, 0, MOST, issues)) {
+      Texts.word(item, issues).ifPresent(path -> given.putIfAbsent(path, item.place()));
+    }
+  }
+
+  /** Adds the question as an issue unless the user has answered it. */
+  void ask(String path, Place place, String question) {
+    asked.add(path);
+    if (!given.containsKey(path)) {
+      issues.add(place, question, "if it is meant, add " + path + " to the list 'confirmed'");
+    }
+  }
+
+  /** Refuses the answers to which there was no question. */
+  void refuseUnasked() {
+    given.forEach(
+        (path, place) -> {
+          if (!asked.contains(path)) {
+            Optional<String> near = NearestName.of(path, asked);
+            issues.add(
+                place,
+                "nothing is in question at " + Printable.quote(path),
+                near.map(name -> "did you mean " + name + "?")
+                    .orElse("take it out of 'confirmed'"));
+          }
+        });
+  }
+}

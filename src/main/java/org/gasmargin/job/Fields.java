@@ -1,0 +1,99 @@
+package org.gasmargin.job;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import org.gasmargin.units.NearestName;
+
+/** The fields of one map of a job, checked for keys that nobody reads. */
+final class Fields {
+  private final Value owner;
+  private final Map<String, Value> values;
+  private final Issues issues;
+
+  private Fields(Value owner, Map<String, Value> values, Issues issues) {
+    this.owner = owner;
+    this.values = values;
+    this.issues = issues;
+  }
+
+  /** The fields of a map that may hold these keys and no others; empty if it is not a map. */
+  static Optional<Fields> of(Value owner, Issues issues, String... keys) {
+    Set<String> known = Set.of(keys);
+    return named(owner, issues).map(fields -> fields.refuseOthersThan(known));
+  }
+
+  /** The fields of a map whose keys are names that the user chooses. */
+  static Optional<Fields> named(Value owner, Issues issues) {
+    if (!(owner.node() instanceof YamlNode.Table table)) {
+      issues.add(
+          owner.place(),
+          "a map of keys was expected "
+              + (owner.path().isEmpty() ? "here" : "for " + owner.path())
+              + ", not "
+              + owner.node().noun());
+      return Optional.empty();
+    }
+    Map<String, Value> values = new LinkedHashMap<>();
+    table
+        .fields()
+        .forEach((key, field) -> values.put(key, owner.child(key, field.key(), field.value())));
+    return Optional.of(new Fields(owner, values, issues));
+  }
+
+  private Fields refuseOthersThan(Set<String> known) {
+    List<String> free = new ArrayList<>(known);
+    free.removeAll(values.keySet());
+    values.forEach(
+        (key, value) -> {
+          if (!known.contains(key)) {
+            issues.add(
+                value.key(),
+                "unknown key " + Printable.quote(key) + " " + owner.within(),
+                NearestName.of(key, free)
+                    .map(name -> "did you mean '" + name + "'?")
+                    .orElse(
+                        "known here are " + String.join(", ", known.stream().sorted().toList())));
+          }
+        });
+    return this;
+  }
+
+  Value owner() {
+    return owner;
+  }
+
+  Map<String, Value> all() {
+    return values;
+  }
+
+  boolean has(String key) {
+    return values.containsKey(key);
+  }
+
+  Optional<Value> find(String key) {
+    return Optional.ofNullable(values.get(key));
+  }
+
+  /** The field, or empty after an issue was added. */
+  Optional<Value> need(String key) {
+    if (!has(key)) {
+      issues.add(owner.key(), "missing key '" + key + "' " + owner.within());
+    }
+    return find(key);
+  }
+
+  /** Adds an issue if a key stands beside another with which it has no meaning. */
+  void refuse(String key, String beside) {
+    find(key)
+        .ifPresent(
+            value ->
+                issues.add(
+                    value.key(),
+                    key + " does not go with " + beside + " " + owner.within(),
+                    "leave one of the two out"));
+  }
+}

@@ -1,0 +1,32 @@
+package org.gasmargin.job;
+
+import java.util.regex.Pattern;
+
+/** Text of unknown origin made harmless for a terminal and a page. */
+final class Printable {
+  /** Control characters, broken surrogates, line separators and marks that turn the direction. */
+  static final String HIDDEN =
+      "[\\p{Cc}\\p{Cs}\\p{Zl}\\p{Zp}\\u202A-\\u202E\\u2066-\\u2069\\uFEFF]";
+
+  private static final Pattern HIDDEN_CHARACTER = Pattern.compile(HIDDEN);
+  private static final int LONGEST_LINE = 400;
+  private static final int LONGEST_QUOTE = 40;
+
+  private Printable() {}
+
+  static String line(String text) {
+    String clean = HIDDEN_CHARACTER.matcher(text).replaceAll("?");
+    return clean.length() <= LONGEST_LINE ? clean : clean.substring(0, LONGEST_LINE) + "...";
+  }
+
+  /** The text in quotes, shortened to what a message can bear. */
+  static String quote(String text) {
+    return "'"
+        + (text.length() <= LONGEST_QUOTE ? text : text.substring(0, LONGEST_QUOTE) + "...")
+        + "'";
+  }
+
+  static boolean hasHidden(String text) {
+    return HIDDEN_CHARACTER.matcher(text).find();
+  }
+}
