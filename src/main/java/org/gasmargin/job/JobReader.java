@@ -1,5 +1,6 @@
 package org.gasmargin.job;
 
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
@@ -37,6 +38,17 @@ public final class JobReader {
     this.gases = gases;
     this.materials = materials;
     this.rulePacks = List.copyOf(rulePacks);
+  }
+
+  /**
+   * Reads a job file.
+   *
+   * @throws JobErrors with everything that is wrong, also if there is no such file
+   */
+  public Job read(Path file) {
+    Issues issues = new Issues();
+    Optional<String> text = JobFile.text(file, issues);
+    return read(file.toString(), text.orElseThrow(issues::errors));
   }
 
   /**
