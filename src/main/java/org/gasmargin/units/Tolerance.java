@@ -12,9 +12,15 @@ final class Tolerance {
    * @param unit the unit of the value
    */
   static double halfWidth(String text, Measured value, Unit unit) {
-    Measured tolerance = Measured.read(text, "± " + unit.difference().dimension().example());
+    Unit difference = unit.difference();
+    Measured tolerance = Measured.read(text, "± " + difference.dimension().example());
     if (tolerance.number() < 0) {
       throw new QuantityError("a tolerance cannot be negative", "write the plain amount");
+    }
+    if (tolerance.unitText().isEmpty() && unit.dimension() != Dimension.RATIO) {
+      throw new QuantityError(
+          "the tolerance '" + tolerance.typed() + "' has no unit",
+          "write \"± " + tolerance.typed() + " " + difference.symbol() + "\"");
     }
     boolean percent = tolerance.unitText().equals(Unit.PERCENT.symbol());
     if (percent && unit.dimension() == Dimension.TEMPERATURE) {
@@ -27,12 +33,8 @@ final class Tolerance {
           "write both as plain numbers, as \"0.80 ± 0.02\"");
     }
     if (percent) {
-      return Math.abs(value.number()) * tolerance.number() / 100 * siPerUnit(unit);
+      return Math.abs(value.number()) * tolerance.number() / 100 * difference.toSi(1, 0);
     }
-    return tolerance.number() * siPerUnit(UnitChoice.of(tolerance, unit.difference().dimension()));
-  }
-
-  private static double siPerUnit(Unit unit) {
-    return unit.difference().toSi(1, 0);
+    return UnitChoice.of(tolerance, difference.dimension()).toSi(tolerance.number(), 0);
   }
 }

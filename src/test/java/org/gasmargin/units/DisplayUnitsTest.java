@@ -19,7 +19,7 @@ class DisplayUnitsTest {
   @ParameterizedTest
   @CsvSource({
     "20041325, ABSOLUTE_PRESSURE, 199.4 bar(g)",
-    "101325, ABSOLUTE_PRESSURE, 0.0000 bar(g)",
+    "101325, ABSOLUTE_PRESSURE, 0.000 bar(g)",
     "1301325, ABSOLUTE_PRESSURE, 12.00 bar(g)",
     "101324.999, ABSOLUTE_PRESSURE, 0.0000 bar(g)",
     "250000, PRESSURE_DIFFERENCE, 2.500 bar",

@@ -83,7 +83,7 @@ class QuantityParserTest {
         "50 l/s|unknown unit 'l/s'; a volume is written in m3, L, dm3, mL, cm3, in3, ft3, gal(US)",
         "50 CM3|unknown unit 'CM3'; did you mean 'cm3'?",
         "50 kg|50 kg is a mass, a volume was expected; write for example \"50 L\"",
-        "50 L ± 1|'1' has no unit; write for example \"± 50 L\"",
+        "50 L ± 1|the tolerance '1' has no unit; write \"± 1 L\"",
         "50 L ± 1 mm|1 mm is a length, a volume was expected; write for example \"50 L\"",
         "50 L ± -1 %|a tolerance cannot be negative; write the plain amount",
         "50 L ± 1 % ± 1 %|unknown unit '% ± 1 %'; a volume is written in m3, L, dm3, mL, cm3, in3,"
