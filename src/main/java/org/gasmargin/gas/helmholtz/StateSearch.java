@@ -1,0 +1,181 @@
+package org.gasmargin.gas.helmholtz;
+
+import java.util.function.DoublePredicate;
+import org.gasmargin.gas.State;
+import org.gasmargin.gas.equation.BracketedNewton;
+import org.gasmargin.gas.equation.EquationPoint;
+import org.gasmargin.gas.equation.HelmholtzEquation;
+import org.gasmargin.gas.phase.PhaseBoundary;
+
+/**
+ * States from pairs of properties other than temperature and density.
+ *
+ * <p>At fixed density u, p and s, and at fixed pressure s and h, rise with temperature over the
+ * stable states, so there is at most one answer. A few Newton steps are tried first: whatever they
+ * reach counts only if it is accepted as a stable state in range. Otherwise the stable range of
+ * temperature is bracketed, which either finds the answer or shows that there is none.
+ */
+final class StateSearch {
+  private static final int QUICK_STEPS = 15;
+  private static final double LAST_STEP = 1e-9;
+
+  /** A usual temperature to start from, K. */
+  private static final double ROOM_TEMPERATURE = 300;
+
+  private static final int HALVINGS = 60;
+
+  private final HelmholtzEquation equation;
+  private final FluidLimits limits;
+  private final DensitySearch densities;
+
+  StateSearch(HelmholtzEquation equation, FluidLimits limits, DensitySearch densities) {
+    this.equation = equation;
+    this.limits = limits;
+    this.densities = densities;
+  }
+
+  /** A single-phase temperature to start from, K. */
+  double usualTemperature() {
+    double above = Math.max(ROOM_TEMPERATURE, 1.05 * limits.phases().gapCloses());
+    return Math.min(above, limits.range().maxTemperature());
+  }
+
+  State atDensity(double density, FixedDensity.Property property, double target, double guess) {
+    EquationPoint point = equation.newPoint();
+    FixedDensity function = new FixedDensity(point, density, property, target);
+    double start =
+        guess >= limits.range().minTemperature() && guess <= limits.range().maxTemperature()
+            ? guess
+            : usualTemperature();
+    double quick = quickTemperature(function, start);
+    if (quick >= limits.range().minTemperature() && quick <= limits.range().maxTemperature()) {
+      point.moveTo(quick, density);
+      if (isStable(point)) {
+        return limits.accept(point);
+      }
+    }
+    double coldest = coldestStable(density);
+    double temperature = bracketed(function, coldest, limits.range().maxTemperature(), start);
+    return limits.accept(point.moveTo(temperature, density));
+  }
+
+  private double quickTemperature(FixedDensity function, double start) {
+    double temperature = start;
+    for (int i = 0; i < QUICK_STEPS; i++) {
+      function.moveTo(temperature);
+      double slope = function.slope();
+      double step = -function.excess() / slope;
+      if (!(slope > 0) || !Double.isFinite(step)) {
+        return Double.NaN;
+      }
+      double size = Math.abs(step);
+      temperature += size > 0.5 * temperature ? 0.5 * temperature * Math.signum(step) : step;
+      if (size < LAST_STEP * temperature) {
+        return temperature;
+      }
+    }
+    return Double.NaN;
+  }
+
+  private boolean isStable(EquationPoint point) {
+    return point.temperature() >= limits.phases().gapCloses()
+        || limits.phases().isStable(point.temperature(), point.density(), point.pressure());
+  }
+
+  /** Lowest temperature at which a density is one stable phase. */
+  private double coldestStable(double density) {
+    EquationPoint point = equation.newPoint();
+    return lowest(temperature -> isStable(point.moveTo(temperature, density)));
+  }
+
+  /** Lowest temperature below the closing of the gap from which on it holds, else the closing. */
+  private double lowest(DoublePredicate holds) {
+    double low = limits.range().minTemperature();
+    double high = limits.phases().gapCloses();
+    if (holds.test(low)) {
+      return low;
+    }
+    for (int i = 0; i < HALVINGS; i++) {
+      double middle = 0.5 * (low + high);
+      if (holds.test(middle)) {
+        high = middle;
+      } else {
+        low = middle;
+      }
+    }
+    return high;
+  }
+
+  /** Root between two temperatures, or a refusal that says on which side it would lie. */
+  private double bracketed(
+      BracketedNewton.Rising function, double coldest, double hottest, double guess) {
+    function.moveTo(coldest);
+    if (function.excess() > 0) {
+      double minimum = limits.range().minTemperature();
+      if (coldest > minimum) {
+        throw limits.insideGap(Math.min(coldest, Math.nextDown(limits.phases().gapCloses())));
+      }
+      throw FluidLimits.refusal(
+          "%s would be colder than %.6g K, where the range of its equation of state begins",
+          limits.name(), minimum);
+    }
+    function.moveTo(hottest);
+    if (function.excess() < 0) {
+      throw FluidLimits.refusal(
+          "%s would be hotter than %.6g K, where the range of its equation of state ends",
+          limits.name(), hottest);
+    }
+    return BracketedNewton.solve(function, coldest, hottest, guess);
+  }
+
+  State atPressure(double pressure, FixedPressure.Property property, double target) {
+    EquationPoint point = equation.newPoint();
+    FixedPressure function = new FixedPressure(point, densities, pressure, property, target);
+    if (quickPoint(function, point)) {
+      return limits.accept(point);
+    }
+    double temperature = slowTemperature(function, pressure);
+    densities.move(point, temperature, pressure);
+    return limits.accept(point);
+  }
+
+  private boolean quickPoint(FixedPressure function, EquationPoint point) {
+    function.moveTo(usualTemperature());
+    for (int i = 0; i < QUICK_STEPS; i++) {
+      double size = function.stepBoth();
+      boolean possible =
+          point.temperature() >= 0.5 * limits.range().minTemperature()
+              && point.temperature() <= 2 * limits.range().maxTemperature()
+              && point.density() <= 2 * limits.maxDensity();
+      if (!possible || !Double.isFinite(size)) {
+        return false;
+      }
+      if (size < LAST_STEP) {
+        return point.temperature() >= limits.range().minTemperature()
+            && point.temperature() <= limits.range().maxTemperature()
+            && point.density() <= limits.maxDensity()
+            && isStable(point);
+      }
+    }
+    return false;
+  }
+
+  /**
+   * Temperature on the liquid or the gas part of the isobar. Above the critical pressure the two
+   * parts meet where the gap closes.
+   */
+  private double slowTemperature(FixedPressure function, double pressure) {
+    PhaseBoundary phases = limits.phases();
+    double minimum = limits.range().minTemperature();
+    double liquidEnds = lowest(t -> !(pressure >= phases.endsAt(t).liquidPressure()));
+    if (liquidEnds > minimum) {
+      double lastLiquid = Math.nextDown(liquidEnds);
+      function.moveTo(lastLiquid);
+      if (function.excess() >= 0) {
+        return bracketed(function, minimum, lastLiquid, lastLiquid);
+      }
+    }
+    double gasBegins = lowest(t -> pressure <= phases.endsAt(t).vapourPressure());
+    return bracketed(function, gasBegins, limits.range().maxTemperature(), usualTemperature());
+  }
+}
