@@ -1,0 +1,74 @@
+package org.gasmargin.worksheet.numbers;
+
+import org.gasmargin.units.Dimension;
+import org.gasmargin.units.DisplayUnits;
+
+/**
+ * From SI to the unit on the page: {@code shown = slope * si + offset}.
+ *
+ * @param slope shown unit per SI unit
+ * @param offset in the shown unit
+ * @param symbol of the shown unit, as printed
+ */
+public record Scale(double slope, double offset, String symbol) {
+  /** The scale of a dimension in the units that the user typed, SI where there are none. */
+  public static Scale of(Dimension dimension, DisplayUnits units) {
+    return switch (dimension) {
+      case PRESSURE_DIFFERENCE -> difference(dimension, Dimension.ABSOLUTE_PRESSURE, "", units);
+      case PRESSURE_RATE -> difference(dimension, Dimension.ABSOLUTE_PRESSURE, "/s", units);
+      case TEMPERATURE_DIFFERENCE -> difference(dimension, Dimension.TEMPERATURE, "", units);
+      default -> plain(dimension, units);
+    };
+  }
+
+  /** The scale of differences between values of a dimension. */
+  public static Scale ofDifference(Dimension dimension, DisplayUnits units) {
+    return switch (dimension) {
+      case ABSOLUTE_PRESSURE -> of(Dimension.PRESSURE_DIFFERENCE, units);
+      case TEMPERATURE -> of(Dimension.TEMPERATURE_DIFFERENCE, units);
+      default -> of(dimension, units);
+    };
+  }
+
+  /** The value on the page. */
+  public double shown(double si) {
+    return slope * si + offset;
+  }
+
+  /** The value in SI of a number on the page. */
+  public double toSi(double shown) {
+    return (shown - offset) / slope;
+  }
+
+  /** Number and unit with a number of decimals. */
+  public String text(double si, int decimals) {
+    return Digits.of(shown(si), decimals) + " " + symbol;
+  }
+
+  /** The symbol of a unit as it is printed, for example {@code °C} for {@code degC}. */
+  public static String printed(String symbol) {
+    return symbol
+        .replace("degC", "°C")
+        .replace("degF", "°F")
+        .replaceAll("\\b(k?m|cm|mm|in|ft)2\\b", "$1²")
+        .replaceAll("\\b(k?m|cm|mm|in|ft)3\\b", "$1³");
+  }
+
+  private static Scale plain(Dimension dimension, DisplayUnits units) {
+    double offset = units.number(0, dimension);
+    double step = dimension == Dimension.ABSOLUTE_PRESSURE ? 1e5 : 1;
+    double slope = (units.number(step, dimension) - offset) / step;
+    return new Scale(slope, offset, printed(units.symbol(dimension)));
+  }
+
+  private static Scale difference(
+      Dimension dimension, Dimension point, String suffix, DisplayUnits units) {
+    if (units.units().containsKey(dimension) || !units.units().containsKey(point)) {
+      return plain(dimension, units);
+    }
+    Scale points = plain(point, units);
+    String symbol =
+        points.symbol().replace("(g)", "").replace("(a)", "").replace("°C", "K") + suffix;
+    return new Scale(points.slope(), 0, symbol);
+  }
+}

@@ -1,0 +1,185 @@
+package org.gasmargin.worksheet.plot;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import org.gasmargin.worksheet.layout.Canvas;
+import org.gasmargin.worksheet.layout.Canvas.Anchor;
+import org.gasmargin.worksheet.layout.Figure;
+import org.gasmargin.worksheet.layout.Stroke;
+import org.gasmargin.worksheet.layout.Style;
+
+/**
+ * Curves over two axes, told apart by dashes and by a letter at the end of each.
+ *
+ * @param x horizontal axis
+ * @param y vertical axis
+ * @param curves in drawing order
+ * @param limits horizontal lines that are not to be crossed
+ */
+public record Plot(Axis x, Axis y, List<Curve> curves, List<LimitLine> limits)
+    implements Figure.Drawing {
+  private static final float ABOVE = 13;
+  private static final float BELOW = 23;
+  private static final float RIGHT = 12;
+  private static final float LABEL_DISTANCE = 8;
+  private static final float RESOLUTION = 0.4f;
+  private static final Style LABEL = new Style(false, Style.SMALLEST, 0);
+  private static final Stroke GRID = Stroke.solid(0.3f, 0.85f);
+  private static final Stroke LIMIT = Stroke.dashed(1f, 7f, 1.5f, 1.5f, 1.5f);
+
+  /** Copies the lists. */
+  public Plot {
+    curves = List.copyOf(curves);
+    limits = List.copyOf(limits);
+  }
+
+  /**
+   * A limit across the plot.
+   *
+   * @param value on the vertical axis
+   * @param label what it is
+   */
+  public record LimitLine(double value, String label) {}
+
+  /** The rectangle between the axes. */
+  private record Area(float left, float top, float width, float height) {
+    float right() {
+      return left + width;
+    }
+
+    float bottom() {
+      return top + height;
+    }
+  }
+
+  @Override
+  public void draw(Canvas canvas, float left, float top, float width, float height) {
+    float tickLabels = 0;
+    for (Axis.Tick tick : y.ticks()) {
+      tickLabels = Math.max(tickLabels, canvas.width(tick.label(), LABEL));
+    }
+    float beside = tickLabels + 5;
+    Area area =
+        new Area(left + beside, top + ABOVE, width - beside - RIGHT, height - ABOVE - BELOW);
+    drawAxes(canvas, area, left);
+    canvas.clipped(
+        area.left(),
+        area.top(),
+        area.width(),
+        area.height(),
+        () -> {
+          limits.forEach(limit -> drawLimit(canvas, area, limit));
+          curves.forEach(curve -> drawCurve(canvas, area, curve));
+        });
+    drawLimitLabels(canvas, area);
+    drawEndLabels(canvas, area);
+  }
+
+  private void drawAxes(Canvas canvas, Area area, float left) {
+    for (Axis.Tick tick : y.ticks()) {
+      float at = across(area, tick.value());
+      canvas.line(area.left(), at, area.right(), at, GRID);
+      canvas.text(tick.label(), area.left() - 3, at + 2.7f, LABEL, Anchor.RIGHT);
+    }
+    float free = Float.NEGATIVE_INFINITY;
+    for (Axis.Tick tick : x.ticks()) {
+      float at = along(area, tick.value());
+      canvas.line(at, area.top(), at, area.bottom(), GRID);
+      float half = canvas.width(tick.label(), LABEL) / 2;
+      if (at - half > free) {
+        canvas.text(tick.label(), at, area.bottom() + 9, LABEL, Anchor.CENTRE);
+        free = at + half + 3;
+      }
+    }
+    canvas.outline(area.left(), area.top(), area.width(), area.height(), Stroke.OUTLINE);
+    canvas.text(y.title(), left, area.top() - 4, LABEL.strong());
+    canvas.text(x.title(), area.right(), area.bottom() + 19, LABEL.strong(), Anchor.RIGHT);
+  }
+
+  private void drawLimit(Canvas canvas, Area area, LimitLine limit) {
+    float at = across(area, limit.value());
+    canvas.line(area.left(), at, area.right(), at, LIMIT);
+  }
+
+  private void drawLimitLabels(Canvas canvas, Area area) {
+    for (LimitLine limit : limits) {
+      double position = y.position(limit.value());
+      float at = across(area, limit.value());
+      float baseline = position > 0.85 ? at + 8 : at - 2.5f;
+      float labelWidth = canvas.width(limit.label(), LABEL);
+      canvas.fill(area.left() + 2, baseline - 6.5f, labelWidth + 2, 8, 1);
+      canvas.text(limit.label(), area.left() + 3, baseline, LABEL);
+    }
+  }
+
+  private void drawCurve(Canvas canvas, Area area, Curve curve) {
+    List<Float> xs = new ArrayList<>();
+    List<Float> ys = new ArrayList<>();
+    int last = curve.points().size() - 1;
+    for (int i = 0; i <= last; i++) {
+      float px = along(area, curve.points().get(i).x());
+      float py = across(area, curve.points().get(i).y());
+      int before = xs.size() - 1;
+      boolean visible =
+          before < 0
+              || Math.abs(px - xs.get(before)) > RESOLUTION
+              || Math.abs(py - ys.get(before)) > RESOLUTION;
+      if (visible || i == last) {
+        xs.add(px);
+        ys.add(py);
+      }
+    }
+    if (xs.size() > 1) {
+      canvas.polyline(array(xs), array(ys), curve.stroke());
+    }
+  }
+
+  /** Letters stand right of the frame where curves end on it, and at the end point elsewhere. */
+  private void drawEndLabels(Canvas canvas, Area area) {
+    List<Curve> labelled =
+        curves.stream()
+            .filter(curve -> !curve.label().isEmpty() && !curve.points().isEmpty())
+            .sorted(Comparator.comparingDouble(curve -> across(area, end(curve).y())))
+            .toList();
+    float[] wanted = new float[labelled.size()];
+    for (int i = 0; i < wanted.length; i++) {
+      float at = across(area, end(labelled.get(i)).y());
+      float inside = Math.max(area.top() + 3, Math.min(area.bottom() - 1, at));
+      wanted[i] = i == 0 ? inside : Math.max(inside, wanted[i - 1] + LABEL_DISTANCE);
+    }
+    float excess = wanted.length == 0 ? 0 : wanted[wanted.length - 1] - area.bottom();
+    for (int i = wanted.length - 1; i >= 0 && excess > 0; i--) {
+      float most = area.bottom() - (wanted.length - 1 - i) * LABEL_DISTANCE;
+      wanted[i] = Math.min(wanted[i], most);
+    }
+    for (int i = 0; i < wanted.length; i++) {
+      float endX = along(area, end(labelled.get(i)).x());
+      float endY = across(area, end(labelled.get(i)).y());
+      canvas.text(labelled.get(i).label(), area.right() + 3.5f, wanted[i] + 2.7f, LABEL.strong());
+      if (area.right() - endX > 4 || Math.abs(endY - wanted[i]) > 4) {
+        canvas.line(endX, endY, area.right() + 3, wanted[i], Stroke.solid(0.3f, 0.5f));
+      }
+    }
+  }
+
+  private static Curve.Point end(Curve curve) {
+    return curve.points().get(curve.points().size() - 1);
+  }
+
+  private float along(Area area, double value) {
+    return area.left() + (float) x.position(value) * area.width();
+  }
+
+  private float across(Area area, double value) {
+    return area.bottom() - (float) y.position(value) * area.height();
+  }
+
+  private static float[] array(List<Float> values) {
+    float[] result = new float[values.size()];
+    for (int i = 0; i < result.length; i++) {
+      result[i] = values.get(i);
+    }
+    return result;
+  }
+}
