@@ -6,6 +6,8 @@ import org.apache.pdfbox.pdmodel.PDPageContentStream;
 
 /** Draws lines, areas and text on one page; knows nothing of tags. */
 public final class Canvas {
+  private static final char NO_BREAK = '\u00a0';
+
   private final PDPageContentStream stream;
   private final Fonts fonts;
   private final float pageHeight;
@@ -45,7 +47,7 @@ public final class Canvas {
           stream.beginText();
           stream.setFont(fonts.font(style), style.size());
           stream.newLineAtOffset(left, pageHeight - y);
-          stream.showText(drawable);
+          stream.showText(drawable.replace(NO_BREAK, ' '));
           stream.endText();
         });
   }

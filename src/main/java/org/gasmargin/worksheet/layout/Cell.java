@@ -32,6 +32,11 @@ public record Cell(List<Run> runs, Optional<Figure> figure, int span, boolean ro
     return new Cell(List.of(new Run(text, Style.TABLE.strong())), Optional.empty(), 1, true);
   }
 
+  /** The name of the row where bold would be too much. */
+  public static Cell plainName(String text) {
+    return new Cell(List.of(new Run(text, Style.TABLE)), Optional.empty(), 1, true);
+  }
+
   /** A drawing. */
   public static Cell of(Figure figure) {
     return new Cell(List.of(), Optional.of(figure), 1, false);

@@ -41,7 +41,7 @@ public final class Fonts {
 
   /**
    * The text with every character that cannot be drawn replaced: white space by a blank, control
-   * characters by nothing, a missing glyph by {@link #REPLACEMENT}.
+   * characters by nothing, a missing glyph by {@link #REPLACEMENT}. Blanks that do not break stay.
    */
   public String drawable(String text) {
     int plain = 0;
@@ -70,7 +70,7 @@ public final class Fonts {
         .codePoints()
         .forEach(
             c -> {
-              if (Character.isWhitespace(c) || c == 0xa0) {
+              if (Character.isWhitespace(c)) {
                 result.append(c == '\n' ? '\n' : ' ');
               } else if (Character.isISOControl(c) || Character.getType(c) == Character.FORMAT) {
                 return;

@@ -5,8 +5,8 @@ import java.util.List;
 import java.util.Optional;
 
 /**
- * A table with a head that is repeated on every page. Rows are not cut, except a row that is taller
- * than {@value #LINES_HELD_TOGETHER} lines.
+ * A table with a head that is repeated on every page. A short table stays on one page. Rows are not
+ * cut, except a row that is taller than {@value #LINES_HELD_TOGETHER} lines.
  *
  * @param columns at least one
  * @param rows each covers all columns
@@ -18,6 +18,7 @@ public record Table(List<Column> columns, List<Row> rows) implements Block {
   private static final float ABOVE = 2;
   private static final float BELOW = 2;
   private static final int LINES_HELD_TOGETHER = 30;
+  private static final int ROWS_HELD_TOGETHER = 6;
   private static final Stroke HEAD_RULE = Stroke.solid(0.7f, 0.2f);
 
   /** Copies the lists and refuses rows that do not cover the columns. */
@@ -95,11 +96,15 @@ public record Table(List<Column> columns, List<Row> rows) implements Block {
     pieces.add(headPiece.keptWithNext());
     Optional<Piece> repeated = Optional.of(headPiece(laidHead, width, false));
     Element body = table.child("TBody");
-    for (Row row : rows) {
+    boolean whole = rows.size() <= ROWS_HELD_TOGETHER;
+    for (int i = 0; i < rows.size(); i++) {
+      Row row = rows.get(i);
+      boolean held = row.keptWithNext() || (whole && i < rows.size() - 1);
       LaidRow laid = layRow(body.child("TR"), row.cells(), false, fonts, widths);
       for (int from = 0; from == 0 || from < laid.lineCount(); from += LINES_HELD_TOGETHER) {
         LaidRow part = laid.lines(from, from + LINES_HELD_TOGETHER);
-        pieces.add(rowPiece(part, row.keptWithNext(), width, repeated));
+        boolean ruled = !row.keptWithNext() && from + LINES_HELD_TOGETHER >= laid.lineCount();
+        pieces.add(rowPiece(part, held, ruled, width, repeated));
       }
     }
     return pieces;
@@ -164,14 +169,14 @@ public record Table(List<Column> columns, List<Row> rows) implements Block {
   }
 
   private static Piece rowPiece(
-      LaidRow row, boolean keptWithNext, float width, Optional<Piece> repeated) {
+      LaidRow row, boolean held, boolean ruled, float width, Optional<Piece> repeated) {
     float height = row.height() + ABOVE + BELOW;
     return new Piece(
         height,
-        keptWithNext,
+        held,
         repeated,
         (page, x, top) -> {
-          if (!keptWithNext) {
+          if (ruled) {
             page.artifact(
                 canvas -> canvas.line(x, top + height, x + width, top + height, Stroke.HAIRLINE));
           }

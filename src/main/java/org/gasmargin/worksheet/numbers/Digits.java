@@ -30,6 +30,31 @@ public final class Digits {
     return of(value, decimalsFor(value));
   }
 
+  /** The value with at most four digits after its first, without needless zeros. */
+  public static String trimmed(double value) {
+    String text = of(value, Math.min(MOST_DECIMALS, decimalsFor(value) + 1));
+    if (text.indexOf('.') < 0 || text.indexOf('×') >= 0) {
+      return text;
+    }
+    return text.replaceAll("0+$", "").replaceAll("\\.$", "");
+  }
+
+  /** The fewest decimals, at most those of four digits, that show all values exactly. */
+  public static int fewestDecimals(double... values) {
+    int most = decimalsFor(values);
+    for (int decimals = 0; decimals < most; decimals++) {
+      double unit = Math.pow(10, decimals);
+      boolean exact = true;
+      for (double value : values) {
+        exact &= Math.abs(value * unit - Math.rint(value * unit)) < 1e-6;
+      }
+      if (exact) {
+        return decimals;
+      }
+    }
+    return most;
+  }
+
   /**
    * The value with a number of decimals, or as a power of ten if it is so large or so small that
    * the decimals would not show it.

@@ -11,12 +11,16 @@ import org.gasmargin.units.DisplayUnits;
  * @param symbol of the shown unit, as printed
  */
 public record Scale(double slope, double offset, String symbol) {
+  private static final char NO_BREAK = '\u00a0';
+  private static final double SHORT = 1000;
+
   /** The scale of a dimension in the units that the user typed, SI where there are none. */
   public static Scale of(Dimension dimension, DisplayUnits units) {
     return switch (dimension) {
       case PRESSURE_DIFFERENCE -> difference(dimension, Dimension.ABSOLUTE_PRESSURE, "", units);
       case PRESSURE_RATE -> difference(dimension, Dimension.ABSOLUTE_PRESSURE, "/s", units);
       case TEMPERATURE_DIFFERENCE -> difference(dimension, Dimension.TEMPERATURE, "", units);
+      case LENGTH -> length(units);
       default -> plain(dimension, units);
     };
   }
@@ -28,6 +32,11 @@ public record Scale(double slope, double offset, String symbol) {
       case TEMPERATURE -> of(Dimension.TEMPERATURE_DIFFERENCE, units);
       default -> of(dimension, units);
     };
+  }
+
+  /** Number and unit without needless zeros. */
+  public String text(double si) {
+    return Digits.trimmed(shown(si)) + NO_BREAK + symbol;
   }
 
   /** The value on the page. */
@@ -42,7 +51,7 @@ public record Scale(double slope, double offset, String symbol) {
 
   /** Number and unit with a number of decimals. */
   public String text(double si, int decimals) {
-    return Digits.of(shown(si), decimals) + " " + symbol;
+    return Digits.of(shown(si), decimals) + NO_BREAK + symbol;
   }
 
   /** The symbol of a unit as it is printed, for example {@code °C} for {@code degC}. */
@@ -52,6 +61,13 @@ public record Scale(double slope, double offset, String symbol) {
         .replace("degF", "°F")
         .replaceAll("\\b(k?m|cm|mm|in|ft)2\\b", "$1²")
         .replaceAll("\\b(k?m|cm|mm|in|ft)3\\b", "$1³");
+  }
+
+  /** Diameters read best in millimetres. */
+  private static Scale length(DisplayUnits units) {
+    return units.units().containsKey(Dimension.LENGTH)
+        ? plain(Dimension.LENGTH, units)
+        : new Scale(SHORT, 0, "mm");
   }
 
   private static Scale plain(Dimension dimension, DisplayUnits units) {

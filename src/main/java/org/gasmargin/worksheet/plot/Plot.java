@@ -1,7 +1,6 @@
 package org.gasmargin.worksheet.plot;
 
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
 import org.gasmargin.worksheet.layout.Canvas;
 import org.gasmargin.worksheet.layout.Canvas.Anchor;
@@ -19,12 +18,11 @@ import org.gasmargin.worksheet.layout.Style;
  */
 public record Plot(Axis x, Axis y, List<Curve> curves, List<LimitLine> limits)
     implements Figure.Drawing {
-  private static final float ABOVE = 13;
+  private static final float ABOVE = 15;
   private static final float BELOW = 23;
   private static final float RIGHT = 12;
-  private static final float LABEL_DISTANCE = 8;
   private static final float RESOLUTION = 0.4f;
-  private static final Style LABEL = new Style(false, Style.SMALLEST, 0);
+  static final Style LABEL = new Style(false, Style.SMALLEST, 0);
   private static final Stroke GRID = Stroke.solid(0.3f, 0.85f);
   private static final Stroke LIMIT = Stroke.dashed(1f, 7f, 1.5f, 1.5f, 1.5f);
 
@@ -43,7 +41,7 @@ public record Plot(Axis x, Axis y, List<Curve> curves, List<LimitLine> limits)
   public record LimitLine(double value, String label) {}
 
   /** The rectangle between the axes. */
-  private record Area(float left, float top, float width, float height) {
+  record Area(float left, float top, float width, float height) {
     float right() {
       return left + width;
     }
@@ -70,10 +68,10 @@ public record Plot(Axis x, Axis y, List<Curve> curves, List<LimitLine> limits)
         area.height(),
         () -> {
           limits.forEach(limit -> drawLimit(canvas, area, limit));
+          drawLimitLabels(canvas, area);
           curves.forEach(curve -> drawCurve(canvas, area, curve));
         });
-    drawLimitLabels(canvas, area);
-    drawEndLabels(canvas, area);
+    new EndLabels(canvas, area, this).draw();
   }
 
   private void drawAxes(Canvas canvas, Area area, float left) {
@@ -93,7 +91,11 @@ public record Plot(Axis x, Axis y, List<Curve> curves, List<LimitLine> limits)
       }
     }
     canvas.outline(area.left(), area.top(), area.width(), area.height(), Stroke.OUTLINE);
-    canvas.text(y.title(), left, area.top() - 4, LABEL.strong());
+    if (EndLabels.anyAbove(this)) {
+      canvas.text(y.title(), area.right(), area.top() - 6, LABEL.strong(), Anchor.RIGHT);
+    } else {
+      canvas.text(y.title(), left, area.top() - 6, LABEL.strong());
+    }
     canvas.text(x.title(), area.right(), area.bottom() + 19, LABEL.strong(), Anchor.RIGHT);
   }
 
@@ -135,43 +137,11 @@ public record Plot(Axis x, Axis y, List<Curve> curves, List<LimitLine> limits)
     }
   }
 
-  /** Letters stand right of the frame where curves end on it, and at the end point elsewhere. */
-  private void drawEndLabels(Canvas canvas, Area area) {
-    List<Curve> labelled =
-        curves.stream()
-            .filter(curve -> !curve.label().isEmpty() && !curve.points().isEmpty())
-            .sorted(Comparator.comparingDouble(curve -> across(area, end(curve).y())))
-            .toList();
-    float[] wanted = new float[labelled.size()];
-    for (int i = 0; i < wanted.length; i++) {
-      float at = across(area, end(labelled.get(i)).y());
-      float inside = Math.max(area.top() + 3, Math.min(area.bottom() - 1, at));
-      wanted[i] = i == 0 ? inside : Math.max(inside, wanted[i - 1] + LABEL_DISTANCE);
-    }
-    float excess = wanted.length == 0 ? 0 : wanted[wanted.length - 1] - area.bottom();
-    for (int i = wanted.length - 1; i >= 0 && excess > 0; i--) {
-      float most = area.bottom() - (wanted.length - 1 - i) * LABEL_DISTANCE;
-      wanted[i] = Math.min(wanted[i], most);
-    }
-    for (int i = 0; i < wanted.length; i++) {
-      float endX = along(area, end(labelled.get(i)).x());
-      float endY = across(area, end(labelled.get(i)).y());
-      canvas.text(labelled.get(i).label(), area.right() + 3.5f, wanted[i] + 2.7f, LABEL.strong());
-      if (area.right() - endX > 4 || Math.abs(endY - wanted[i]) > 4) {
-        canvas.line(endX, endY, area.right() + 3, wanted[i], Stroke.solid(0.3f, 0.5f));
-      }
-    }
-  }
-
-  private static Curve.Point end(Curve curve) {
-    return curve.points().get(curve.points().size() - 1);
-  }
-
-  private float along(Area area, double value) {
+  float along(Area area, double value) {
     return area.left() + (float) x.position(value) * area.width();
   }
 
-  private float across(Area area, double value) {
+  float across(Area area, double value) {
     return area.bottom() - (float) y.position(value) * area.height();
   }
 

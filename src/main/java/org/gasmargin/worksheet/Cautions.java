@@ -1,0 +1,34 @@
+package org.gasmargin.worksheet;
+
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+import org.gasmargin.rules.Finding;
+
+/** The cautions of a sheet: those that always hold and those of its findings. */
+final class Cautions {
+  /** Heads every list of cautions. */
+  static final String DEFERENCE =
+      "This sheet predicts; it gives no permission and replaces no examination. Local codes, the"
+          + " nameplate and documents of the equipment, and licensed inspection decide, and they"
+          + " prevail over any number on these pages.";
+
+  private static final List<String> ALWAYS =
+      List.of(
+          "Never exceed a marked pressure or temperature because a calculation allows it.",
+          "Gauges, plates and gas labels were taken as stated: a wrong input makes a wrong page.");
+
+  private Cautions() {}
+
+  /** The cautions that always hold, then those of some findings, each once. */
+  static List<String> of(List<Finding> findings) {
+    Set<String> cautions = new LinkedHashSet<>(ALWAYS);
+    for (Finding finding : findings) {
+      if (!finding.caution().isBlank()) {
+        cautions.add(Prose.tidy(finding.caution()));
+      }
+    }
+    return new ArrayList<>(cautions);
+  }
+}

@@ -1,0 +1,192 @@
+package org.gasmargin.worksheet;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import org.gasmargin.gas.Gas;
+import org.gasmargin.gas.ValidityRange;
+import org.gasmargin.process.Closure;
+import org.gasmargin.process.Path;
+import org.gasmargin.process.StepResult;
+import org.gasmargin.rules.NotApplied;
+import org.gasmargin.rules.PackUsed;
+import org.gasmargin.units.Dimension;
+import org.gasmargin.vessel.Layer;
+import org.gasmargin.vessel.Vessel;
+import org.gasmargin.worksheet.layout.Cell;
+import org.gasmargin.worksheet.layout.Flow;
+import org.gasmargin.worksheet.layout.Paragraph;
+import org.gasmargin.worksheet.layout.Run;
+import org.gasmargin.worksheet.layout.Style;
+import org.gasmargin.worksheet.layout.Table;
+import org.gasmargin.worksheet.numbers.Digits;
+import org.gasmargin.worksheet.numbers.Scale;
+
+/** How the numbers were made, how far the models hold, and what is left over in the balances. */
+final class MethodPart {
+  private final WorksheetContent content;
+  private final Scale temperature;
+  private final Scale pressure;
+
+  MethodPart(WorksheetContent content) {
+    this.content = content;
+    temperature = Scale.of(Dimension.TEMPERATURE, content.units());
+    pressure = Scale.of(Dimension.ABSOLUTE_PRESSURE, content.units());
+  }
+
+  void write(Flow flow) {
+    flow.section("Closure of mass and energy");
+    flow.add(closures());
+    flow.section("Method, validity and sources");
+    labelled(
+        flow,
+        "Method",
+        "First law for the gas in each vessel with the real gas's equation of state, step by step."
+            + " Every step is computed without heat exchange, at constant temperature, and with"
+            + " heat passing into the wall where the wall is described. The extremes cover every"
+            + " state that the earlier steps allow, with the tolerances of the inputs; the rules"
+            + " judge on them.");
+    for (Gas gas : gases()) {
+      labelled(flow, gas.name(), validity(gas));
+      warnings(gas).forEach(warning -> labelled(flow, "Beyond the fit", warning));
+    }
+    materials().forEach((name, source) -> labelled(flow, "Material " + name, source));
+    for (PackUsed pack : content.judgement().packs()) {
+      labelled(
+          flow,
+          "Rule pack " + pack.name(),
+          Prose.sentence(pack.because()) + " SHA-256 " + pack.sha256() + ".");
+    }
+    notApplied().forEach((rule, why) -> labelled(flow, "Not applied", rule + why));
+    labelled(
+        flow,
+        "Identity",
+        "Inputs and rule packs: SHA-256 "
+            + content.inputsSha256()
+            + ". Program: gasmargin "
+            + content.programVersion()
+            + ". A hash shows that nothing was changed; it is no signature.");
+  }
+
+  private static void labelled(Flow flow, String label, String text) {
+    flow.add(Paragraph.of(new Run(label + ": ", Style.TABLE.strong()), new Run(text, Style.TABLE)));
+    flow.gap(2);
+  }
+
+  private Table closures() {
+    List<Table.Row> rows = new ArrayList<>();
+    for (StepResult result : content.result().steps()) {
+      rows.add(
+          result
+              .closure()
+              .map(
+                  closure ->
+                      Table.Row.of(
+                          Cell.name("Step " + result.step().id()),
+                          Cell.of(Digits.power(closure.massRelative())),
+                          Cell.of(Digits.power(closure.energyRelative())),
+                          Cell.of(Digits.power(Closure.BOUND)),
+                          Cell.of(closure.holds() ? "holds" : "DOES NOT HOLD: not assessed")))
+              .orElseGet(
+                  () ->
+                      Table.Row.of(
+                          Cell.name("Step " + result.step().id()),
+                          Cell.of("no balance: nothing could be computed").across(4))));
+    }
+    return new Table(
+        List.of(
+            Table.Column.text("Step"),
+            Table.Column.numbers("Mass left over, relative"),
+            Table.Column.numbers("Energy left over, relative"),
+            Table.Column.numbers("Bound"),
+            Table.Column.text("Result")),
+        rows);
+  }
+
+  private Set<Gas> gases() {
+    Set<Gas> gases = new LinkedHashSet<>();
+    content.result().procedure().vessels().forEach(vessel -> gases.add(vessel.gas()));
+    return gases;
+  }
+
+  private String validity(Gas gas) {
+    ValidityRange range = gas.validity();
+    return Prose.sentence(gas.citation())
+        + " Used from "
+        + temperature.text(range.minTemperature(), 0)
+        + " to "
+        + temperature.text(range.maxTemperature(), 0)
+        + " and up to "
+        + pressure.text(range.maxPressure(), 0)
+        + "; published for temperatures up to "
+        + temperature.text(range.fittedMaxTemperature(), 0)
+        + ".";
+  }
+
+  private List<String> warnings(Gas gas) {
+    double fitted = gas.validity().fittedMaxTemperature();
+    List<String> warnings = new ArrayList<>();
+    for (StepResult result : content.result().steps()) {
+      if (vessel(result).gas().equals(gas)) {
+        for (PathLook look : PathLook.ALL) {
+          result
+              .path(look.kind())
+              .filter(path -> path.peakGasTemperature() > fitted)
+              .ifPresent(path -> warnings.add(warning(result, look, path, fitted)));
+        }
+      }
+    }
+    return warnings;
+  }
+
+  private String warning(StepResult result, PathLook look, Path path, double fitted) {
+    return "step "
+        + result.step().id()
+        + " reaches "
+        + temperature.text(path.peakGasTemperature(), 1)
+        + " on path "
+        + look.letter()
+        + "; above "
+        + temperature.text(fitted, 1)
+        + " the equation of state extrapolates its data and its accuracy is not known.";
+  }
+
+  private Vessel vessel(StepResult result) {
+    return content.result().procedure().vessels().stream()
+        .filter(vessel -> vessel.name().equals(result.step().vessel()))
+        .findFirst()
+        .orElseThrow();
+  }
+
+  private Map<String, String> materials() {
+    Map<String, String> sources = new LinkedHashMap<>();
+    for (Vessel vessel : content.result().procedure().vessels()) {
+      vessel
+          .wall()
+          .ifPresent(
+              wall -> {
+                for (Layer layer : wall.layers()) {
+                  sources.put(layer.material().name(), Prose.sentence(layer.material().source()));
+                }
+              });
+    }
+    return sources;
+  }
+
+  /** Rules with the steps that they do not concern, and why. */
+  private Map<String, String> notApplied() {
+    Map<String, List<String>> steps = new LinkedHashMap<>();
+    for (NotApplied rule : content.judgement().notApplied()) {
+      steps
+          .computeIfAbsent(
+              rule.rule() + ": " + Prose.sentence(rule.reason()), r -> new ArrayList<>())
+          .add(rule.step());
+    }
+    Map<String, String> result = new LinkedHashMap<>();
+    steps.forEach((rule, of) -> result.put(rule, " Step " + String.join(", ", of) + "."));
+    return result;
+  }
+}

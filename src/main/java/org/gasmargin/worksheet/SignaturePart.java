@@ -1,0 +1,47 @@
+package org.gasmargin.worksheet;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.gasmargin.worksheet.layout.Barred;
+import org.gasmargin.worksheet.layout.Block;
+import org.gasmargin.worksheet.layout.Cell;
+import org.gasmargin.worksheet.layout.Flow;
+import org.gasmargin.worksheet.layout.Gap;
+import org.gasmargin.worksheet.layout.Paragraph;
+import org.gasmargin.worksheet.layout.Run;
+import org.gasmargin.worksheet.layout.Style;
+import org.gasmargin.worksheet.layout.Table;
+
+/** Boxes for the people who answer for the sheet, under the cautions once more. */
+final class SignaturePart {
+  private SignaturePart() {}
+
+  static void write(Flow flow, WorksheetContent content) {
+    flow.section("Signatures");
+    List<Block> cautions = new ArrayList<>();
+    cautions.add(
+        Paragraph.of(
+            new Run("CAUTION  ", Style.STRONG), new Run(Cautions.DEFERENCE, Style.STRONG)));
+    for (String caution : Cautions.of(content.judgement().findings())) {
+      cautions.add(new Gap(1.5f));
+      cautions.add(Paragraph.of(caution, Style.TABLE));
+    }
+    flow.add(new Barred(cautions, 4, 0, 0.94f));
+    flow.gap(6);
+    flow.add(
+        new Table(
+            List.of(
+                Table.Column.text("Role").wide(110),
+                Table.Column.text("Name"),
+                Table.Column.text("Date").wide(90),
+                Table.Column.text("Signature").wide(150)),
+            List.of(
+                row("Preparation", content.preparedBy()),
+                row("Independent check", ""),
+                row("Approval", ""))));
+  }
+
+  private static Table.Row row(String role, String name) {
+    return Table.Row.of(Cell.name(role + "\n\n"), Cell.of(name), Cell.of(""), Cell.of(""));
+  }
+}

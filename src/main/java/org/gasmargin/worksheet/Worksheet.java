@@ -1,0 +1,66 @@
+package org.gasmargin.worksheet;
+
+import java.io.IOException;
+import java.io.OutputStream;
+import java.io.UncheckedIOException;
+import java.util.List;
+import org.gasmargin.rules.Finding;
+import org.gasmargin.worksheet.layout.Flow;
+import org.gasmargin.worksheet.layout.Sheet;
+
+/** The document that a reviewer checks by hand and signs. */
+public final class Worksheet {
+  private static final int HASH_DIGITS_PER_PAGE = 16;
+  private static final int MOST_ON_FIRST_PAGE = 6;
+
+  private Worksheet() {}
+
+  /**
+   * Writes the worksheet as PDF/A-3a and PDF/UA-1. The same content gives the same bytes.
+   *
+   * @param content what to print
+   * @param out left open
+   * @throws IOException if {@code out} does not take the bytes
+   */
+  public static void write(WorksheetContent content, OutputStream out) throws IOException {
+    try (Sheet sheet = new Sheet()) {
+      Flow flow = new Flow(sheet);
+      Governing governing = new Governing(content);
+      FindingsTable findings = new FindingsTable(content, governing);
+      new HeadingPart(content, governing).write(flow);
+      governingFindings(flow, governing, findings);
+      InputsPart.write(flow, content);
+      new StepsPart(content).write(flow);
+      flow.section("Findings");
+      flow.add(findings.full(governing.assessed()));
+      NotAssessedPart.write(flow, content);
+      new MethodPart(content).write(flow);
+      AssumptionsPart.write(flow, content);
+      SignaturePart.write(flow, content);
+      flow.end();
+      sheet.write(marks(content), out);
+    } catch (UncheckedIOException e) {
+      throw e.getCause();
+    }
+  }
+
+  private static void governingFindings(Flow flow, Governing governing, FindingsTable table) {
+    List<Finding> deciding = governing.findings();
+    flow.section("Governing findings");
+    flow.add(table.brief(deciding.subList(0, Math.min(MOST_ON_FIRST_PAGE, deciding.size()))));
+  }
+
+  private static Sheet.Marks marks(WorksheetContent content) {
+    String hash = content.inputsSha256().substring(0, HASH_DIGITS_PER_PAGE);
+    String job = "Job " + content.number() + " · revision " + content.revision();
+    return new Sheet.Marks(
+        content.title() + ", job " + content.number() + ", worksheet",
+        "en-GB",
+        "gasmargin " + content.programVersion(),
+        content.title(),
+        job + " · " + content.judgement().verdict().words(),
+        job,
+        "inputs " + hash + " · gasmargin " + content.programVersion(),
+        Long.parseUnsignedLong(hash, 16));
+  }
+}
