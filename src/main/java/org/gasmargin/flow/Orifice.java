@@ -67,7 +67,7 @@ public record Orifice(double diameter, double dischargeCoefficient) {
     double k = Math.max(upstream.isentropicExponent(), 1.05);
     double previous = Math.log(2 / (k + 1)) / (k - 1);
     double machExcess = machExcess(gas, upstream, previous);
-    double current = previous * (1 + 0.02 * Math.signum(-machExcess));
+    double current = 1.02 * previous;
     for (int i = 0; i < MAX_STEPS; i++) {
       State throat = onIsentrope(gas, upstream, current);
       double excess = machExcess(gas, upstream, throat);
