@@ -38,12 +38,17 @@ final class BranchMarch {
       }
       march.run(start);
       return new Branch(
-          march.states, march.ends, Node.join(settled, march.words()), Optional.empty());
+          march.states,
+          march.ends,
+          Node.join(settled, march.words()),
+          !march.clipped,
+          Optional.empty());
     } catch (OutsideValidity failure) {
       return new Branch(
           march.states,
           List.of(),
           Node.join(settled, march.words()),
+          !march.clipped,
           Optional.of(String.valueOf(failure.getMessage())));
     }
   }

@@ -97,10 +97,11 @@ final class StepBounds {
     for (int i = 0; i < branch.states().size(); i++) {
       String words = i == 0 ? entry.words() : Node.join(entry.words(), branch.words());
       State state = branch.states().get(i);
-      hottest.consider(state, words);
-      coldest.consider(state, words);
-      highest.consider(state, words);
-      lowest.consider(state, words);
+      Optional<State> from = branch.stretchStart(i);
+      hottest.consider(state, words, from);
+      coldest.consider(state, words, from);
+      highest.consider(state, words, from);
+      lowest.consider(state, words, from);
     }
     for (State end : branch.ends()) {
       ends.add(entry.then(end, branch.words()));
@@ -168,7 +169,8 @@ final class StepBounds {
         search.consider(
             end,
             Node.join(
-                Node.join(entry.words(), settled), "pushed ahead without mixing or heat loss"));
+                Node.join(entry.words(), settled), "pushed ahead without mixing or heat loss"),
+            Optional.of(start));
       } catch (OutsideValidity failure) {
         failures.add("gas pushed ahead without mixing: " + failure.getMessage());
         return Optional.empty();
