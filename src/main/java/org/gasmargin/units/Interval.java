@@ -29,6 +29,17 @@ public record Interval(double low, double nominal, double high) {
     return new Interval(nominal - halfWidth, nominal, nominal + halfWidth);
   }
 
+  /**
+   * The value at a position within the tolerance.
+   *
+   * @param position from -1, the lowest, over 0, the nominal, to 1, the highest
+   */
+  public double at(double position) {
+    return position < 0
+        ? nominal + position * (nominal - low)
+        : nominal + position * (high - nominal);
+  }
+
   /** Whether the tolerance is zero. */
   public boolean isExact() {
     return low == high;

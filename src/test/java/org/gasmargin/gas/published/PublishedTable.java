@@ -11,10 +11,10 @@ import java.util.Map;
 import java.util.stream.Stream;
 
 /** Rows of a comma-separated table in the folder of published data; lines with # are comments. */
-final class PublishedTable {
+public final class PublishedTable {
   /** One row, by column name; empty cells are absent. */
-  record Row(Map<String, String> cells) {
-    String text(String column) {
+  public record Row(Map<String, String> cells) {
+    public String text(String column) {
       String cell = cells.get(column);
       if (cell == null) {
         throw new IllegalArgumentException("no " + column + " in " + cells);
@@ -22,11 +22,11 @@ final class PublishedTable {
       return cell;
     }
 
-    double number(String column) {
+    public double number(String column) {
       return Double.parseDouble(text(column));
     }
 
-    boolean has(String column) {
+    public boolean has(String column) {
       return cells.containsKey(column);
     }
 
@@ -38,7 +38,7 @@ final class PublishedTable {
 
   private PublishedTable() {}
 
-  static Stream<Row> rows(String name) {
+  public static Stream<Row> rows(String name) {
     String path = "/published/" + name + ".csv";
     List<String> lines = new ArrayList<>();
     try (InputStream stream = PublishedTable.class.getResourceAsStream(path)) {

@@ -1,0 +1,77 @@
+package org.gasmargin.process.modelled;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import org.gasmargin.vessel.Correlation;
+import org.gasmargin.vessel.JetAndNaturalConvection;
+import org.gasmargin.vessel.JetAndNaturalConvection.Numbers;
+
+/** Says where a path leaves the range of the correlation for the film inside. */
+final class FilmNotes {
+  private FilmNotes() {}
+
+  /**
+   * The notes of a path.
+   *
+   * @param film the correlation
+   * @param samples instants of the path
+   * @param filling whether gas flows in
+   * @param molarMass kg/mol
+   */
+  static List<String> of(
+      JetAndNaturalConvection film,
+      List<PathRecorder.Sample> samples,
+      boolean filling,
+      double molarMass) {
+    List<String> notes = new ArrayList<>();
+    if (filling && !film.creditsJet()) {
+      notes.add(
+          "the bore of the inlet is not known: no stirring by the jet is credited, only natural"
+              + " convection");
+    }
+    Range reynolds = new Range();
+    Range rayleigh = new Range();
+    for (PathRecorder.Sample sample : samples) {
+      double surface = sample.z()[GasWallSystem.INNER_SURFACE];
+      double inflow = filling ? Math.max(0, sample.rate() * molarMass) : 0;
+      Numbers numbers = film.numbers(sample.state(), surface, inflow);
+      if (numbers.jetReynolds() > 0) {
+        reynolds.take(numbers.jetReynolds());
+      }
+      if (Math.abs(sample.state().temperature() - surface) > 1) {
+        rayleigh.take(numbers.rayleigh());
+      }
+    }
+    reynolds.note("Re_d", Numbers.MIN_REYNOLDS, Numbers.MAX_REYNOLDS, notes);
+    rayleigh.note("Ra_D", Numbers.MIN_RAYLEIGH, Numbers.MAX_RAYLEIGH, notes);
+    return notes;
+  }
+
+  /** Lowest and highest value of a dimensionless number. */
+  private static final class Range {
+    private double lowest = Double.POSITIVE_INFINITY;
+    private double highest = Double.NEGATIVE_INFINITY;
+
+    void take(double value) {
+      lowest = Math.min(lowest, value);
+      highest = Math.max(highest, value);
+    }
+
+    void note(String symbol, double from, double to, List<String> notes) {
+      if (lowest < from || highest > to) {
+        notes.add(
+            String.format(
+                Locale.ROOT,
+                "%s runs from %.1e to %.1e, beyond the range %.0e to %.0e of the correlation for"
+                    + " %s",
+                symbol,
+                lowest,
+                highest,
+                from,
+                to,
+                Correlation.JET_AND_NATURAL.name()));
+      }
+    }
+  }
+}

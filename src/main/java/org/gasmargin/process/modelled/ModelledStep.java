@@ -1,0 +1,36 @@
+package org.gasmargin.process.modelled;
+
+import java.util.List;
+import java.util.Optional;
+import org.gasmargin.process.Closure;
+import org.gasmargin.process.Event;
+import org.gasmargin.process.PathOutcome;
+
+/**
+ * The modelled path of one step.
+ *
+ * @param outcome the path, or why there is none
+ * @param end what the vessel holds afterwards; empty if there is no path, and after the compression
+ *     of trapped gas, which leaves other gas in the vessel
+ * @param closure balances of the path, if there is one
+ * @param events in rising time
+ * @param notes in plain words
+ */
+public record ModelledStep(
+    PathOutcome outcome,
+    Optional<VesselCondition> end,
+    Optional<Closure> closure,
+    List<Event> events,
+    List<String> notes) {
+
+  /** Copies the lists. */
+  public ModelledStep {
+    events = List.copyOf(events);
+    notes = List.copyOf(notes);
+  }
+
+  /** A step without a path. */
+  static ModelledStep without(PathOutcome outcome) {
+    return new ModelledStep(outcome, Optional.empty(), Optional.empty(), List.of(), List.of());
+  }
+}

@@ -1,0 +1,198 @@
+package org.gasmargin.process.modelled;
+
+import java.util.Collections;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.gasmargin.gas.OutsideValidity;
+import org.gasmargin.process.Closure;
+import org.gasmargin.process.PathOutcome;
+import org.gasmargin.process.Site;
+import org.gasmargin.process.Step;
+import org.gasmargin.vessel.Correlation;
+import org.gasmargin.vessel.FilmLaw;
+import org.gasmargin.vessel.InsideFilm;
+import org.gasmargin.vessel.JetAndNaturalConvection;
+import org.gasmargin.vessel.Layer;
+import org.gasmargin.vessel.OutsideExchange;
+import org.gasmargin.vessel.Vessel;
+import org.gasmargin.vessel.Wall;
+import org.gasmargin.vessel.WallConduction;
+
+/**
+ * One vessel with its wall and surroundings, at one choice of the uncertain inputs: runs steps on
+ * the modelled path. Immutable; the vessel's condition is handed from step to step.
+ */
+public final class ModelledVessel {
+  /** Tolerance of the integrator: largest estimated relative error of a step. */
+  static final double TOLERANCE = 1e-7;
+
+  private final Vessel vessel;
+  private final ModelInputs inputs;
+  private final StepPlanner planner;
+  private final double tolerance;
+  private final Optional<WallConduction> conduction;
+  private final Optional<OutsideExchange> outside;
+
+  /**
+   * A vessel.
+   *
+   * @param vessel with or without a wall
+   * @param site surroundings
+   * @param inputs where within its tolerance each input is taken
+   */
+  public ModelledVessel(Vessel vessel, Site site, ModelInputs inputs) {
+    this(vessel, site, inputs, TOLERANCE, 1);
+  }
+
+  /** A vessel with another tolerance and a finer wall, which shows convergence. */
+  ModelledVessel(
+      Vessel vessel, Site site, ModelInputs inputs, double tolerance, int wallRefinement) {
+    this.vessel = vessel;
+    this.inputs = inputs;
+    this.tolerance = tolerance;
+    double ambient = inputs.value(UncertainInput.AMBIENT_TEMPERATURE, site.ambientTemperature());
+    double atmosphere =
+        inputs.value(UncertainInput.ATMOSPHERIC_PRESSURE, site.atmosphericPressure());
+    this.planner = new StepPlanner(vessel.gas(), inputs, atmosphere);
+    this.conduction =
+        vessel.wall().map(wall -> new WallConduction(wall, thicknesses(wall), wallRefinement));
+    this.outside =
+        vessel
+            .wall()
+            .map(
+                wall ->
+                    new OutsideExchange(
+                        wall,
+                        conduction.orElseThrow().thickness(),
+                        ambient,
+                        atmosphere,
+                        inputs.position(UncertainInput.FILM_OUTSIDE)));
+  }
+
+  private double[] thicknesses(Wall wall) {
+    return wall.layers().stream()
+        .map(Layer::thickness)
+        .mapToDouble(thickness -> inputs.value(UncertainInput.WALL_THICKNESS, thickness))
+        .toArray();
+  }
+
+  /**
+   * What the vessel holds at the start of the job.
+   *
+   * @throws OutsideValidity if the gas has no such state
+   */
+  public VesselCondition start() {
+    double temperature = inputs.value(UncertainInput.START_TEMPERATURE, vessel.startTemperature());
+    double pressure = inputs.value(UncertainInput.START_PRESSURE, vessel.startPressure());
+    double volume = inputs.value(UncertainInput.VOLUME, vessel.volume());
+    double wall =
+        inputs.value(UncertainInput.START_WALL_TEMPERATURE, vessel.startWallTemperature());
+    double density = vessel.gas().atTemperaturePressure(temperature, pressure).molarDensity();
+    return new VesselCondition(
+        volume,
+        density * volume,
+        temperature,
+        Collections.nCopies(conduction.map(WallConduction::cells).orElse(0), wall));
+  }
+
+  /**
+   * Runs one step.
+   *
+   * @param step the step
+   * @param start what the vessel holds before it
+   * @return the path, or why there is none; never throws {@link OutsideValidity}
+   */
+  public ModelledStep run(Step step, VesselCondition start) {
+    if (conduction.isEmpty()) {
+      return ModelledStep.without(
+          new PathOutcome.Absent("no wall was given, so heat exchange cannot be modelled"));
+    }
+    try {
+      return run(planner.plan(step, start), start, conduction.get());
+    } catch (OutsideValidity refused) {
+      return ModelledStep.without(new PathOutcome.Failed(String.valueOf(refused.getMessage())));
+    }
+  }
+
+  private ModelledStep run(StepPlan plan, VesselCondition start, WallConduction wall) {
+    if (plan instanceof StepPlan.None none) {
+      return ModelledStep.without(new PathOutcome.Absent(none.reason()));
+    }
+    if (plan instanceof StepPlan.Over over) {
+      return standstill(start, wall, over.note());
+    }
+    StepPlan.Integration integration = (StepPlan.Integration) plan;
+    FilmLaw film = film(integration.jetBore());
+    GasWallSystem system = system(integration, film, wall);
+    double[] z =
+        system.unknowns(
+            integration.startExtent(),
+            start.temperature(),
+            start.wall().stream().mapToDouble(Double::doubleValue).toArray());
+    Watches watches = new Watches(system, integration);
+    Trajectory trajectory =
+        new ImplicitIntegrator(tolerance)
+            .integrate(system, z, integration.duration(), watches.list());
+    watches.check(trajectory);
+    PathRecorder recorder = new PathRecorder(vessel.gas(), system, wall, integration.opening());
+    recorder.record(trajectory, watches.reached(trajectory));
+    List<String> notes =
+        film instanceof JetAndNaturalConvection correlation
+            ? FilmNotes.of(
+                correlation,
+                recorder.samples(),
+                integration.carried() instanceof Carried.Supply,
+                vessel.gas().molarMass())
+            : List.of();
+    return new ModelledStep(
+        new PathOutcome.Computed(recorder.path()),
+        recorder.end(),
+        Optional.of(new Balance(system, wall).closure(trajectory)),
+        watches.events(trajectory),
+        notes);
+  }
+
+  /** A step that is over before it starts: one point and the same condition. */
+  private ModelledStep standstill(VesselCondition start, WallConduction wall, String note) {
+    StepPlan.Integration closed =
+        StepPlanner.rigid(start, new Carried.Own(), new Opening.Constant(0), 0, StepPlan.NO_GUARD);
+    GasWallSystem system = system(closed, film(OptionalDouble.empty()), wall);
+    double[] z =
+        system.unknowns(
+            start.amount(),
+            start.temperature(),
+            start.wall().stream().mapToDouble(Double::doubleValue).toArray());
+    system.makeConsistent(0, z);
+    PathRecorder recorder = new PathRecorder(vessel.gas(), system, wall, closed.opening());
+    recorder.recordInstant(z);
+    return new ModelledStep(
+        new PathOutcome.Computed(recorder.path()),
+        Optional.of(start),
+        Optional.of(new Closure(0, 0)),
+        List.of(),
+        List.of(note));
+  }
+
+  private GasWallSystem system(StepPlan.Integration plan, FilmLaw film, WallConduction wall) {
+    return new GasWallSystem(
+        vessel.gas(),
+        plan.content(),
+        plan.carried(),
+        plan.opening(),
+        film,
+        wall,
+        outside.orElseThrow(),
+        plan.guard());
+  }
+
+  private FilmLaw film(OptionalDouble jetBore) {
+    Wall wall = vessel.wall().orElseThrow();
+    if (wall.inside() instanceof InsideFilm.Given given) {
+      return new FilmLaw.Constant(inputs.value(UncertainInput.FILM_INSIDE, given.coefficient()));
+    }
+    double factor =
+        1 + Correlation.JET_AND_NATURAL.uncertainty() * inputs.position(UncertainInput.FILM_INSIDE);
+    return new JetAndNaturalConvection(vessel.gas(), wall.shape(), jetBore, factor);
+  }
+}

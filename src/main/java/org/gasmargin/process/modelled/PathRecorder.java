@@ -1,0 +1,176 @@
+package org.gasmargin.process.modelled;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.TreeSet;
+import org.gasmargin.gas.Gas;
+import org.gasmargin.gas.State;
+import org.gasmargin.process.Path;
+import org.gasmargin.process.PathPoint;
+import org.gasmargin.vessel.WallConduction;
+
+/**
+ * Reads a path off a solution: {@value #INTERVALS} equal intervals and the instants of events. The
+ * extremes are taken over these points and over every step of the integration.
+ */
+final class PathRecorder {
+  /** Number of equal intervals; a multiple of twelve. */
+  static final int INTERVALS = 240;
+
+  private final Gas gas;
+  private final GasWallSystem system;
+  private final WallConduction wall;
+  private final Opening opening;
+  private final List<Sample> samples = new ArrayList<>();
+  private final List<Sample> stepEnds = new ArrayList<>();
+
+  /**
+   * One instant.
+   *
+   * @param time s
+   * @param z unknowns
+   * @param state of the gas
+   * @param pressure Pa absolute: that of the state, or the one that is prescribed
+   * @param rate of the extent
+   */
+  @SuppressWarnings("ArrayRecordComponent") // never compared, never handed out of the package
+  record Sample(double time, double[] z, State state, double pressure, double rate) {}
+
+  /**
+   * A recorder.
+   *
+   * @param gas in the vessel
+   * @param system equations that were solved
+   * @param wall of the vessel
+   * @param opening what set the flow
+   */
+  PathRecorder(Gas gas, GasWallSystem system, WallConduction wall, Opening opening) {
+    this.gas = gas;
+    this.system = system;
+    this.wall = wall;
+    this.opening = opening;
+  }
+
+  /**
+   * Records a solution.
+   *
+   * @param trajectory the solution
+   * @param endPressure pressure at which an event ended it, Pa absolute
+   */
+  void record(Trajectory trajectory, OptionalDouble endPressure) {
+    for (DenseStep step : trajectory.steps()) {
+      stepEnds.add(sample(step.end(), step.endUnknowns()));
+    }
+    TreeSet<Double> times = new TreeSet<>();
+    double end = trajectory.end();
+    for (int i = 0; i < INTERVALS; i++) {
+      times.add(end * i / INTERVALS);
+    }
+    trajectory.sightings().forEach(s -> times.add(s.time()));
+    times.remove(end);
+    DenseStep first = trajectory.steps().get(0);
+    samples.add(sample(0, first.startUnknowns()));
+    times.remove(0.0);
+    int index = 0;
+    for (double time : times) {
+      while (trajectory.steps().get(index).end() < time) {
+        index++;
+      }
+      DenseStep step = trajectory.steps().get(index);
+      double[] z = time == step.end() ? step.endUnknowns() : consistent(time, step.at(time));
+      samples.add(sample(time, z));
+    }
+    Sample last = stepEnds.remove(stepEnds.size() - 1);
+    double lastPressure = endPressure.orElse(last.pressure());
+    samples.add(new Sample(last.time(), last.z(), last.state(), lastPressure, last.rate()));
+  }
+
+  /** Records a single instant. */
+  void recordInstant(double[] z) {
+    samples.add(sample(0, z));
+  }
+
+  /** The instants of the path. */
+  List<Sample> samples() {
+    return List.copyOf(samples);
+  }
+
+  /** The last instant. */
+  Sample last() {
+    return samples.get(samples.size() - 1);
+  }
+
+  /** The path. */
+  Path path() {
+    List<Sample> all = new ArrayList<>(samples);
+    all.addAll(stepEnds);
+    double hottest = Double.NEGATIVE_INFINITY;
+    double coldest = Double.POSITIVE_INFINITY;
+    double highest = Double.NEGATIVE_INFINITY;
+    double lowest = Double.POSITIVE_INFINITY;
+    double hottestWall = Double.NEGATIVE_INFINITY;
+    double coldestWall = Double.POSITIVE_INFINITY;
+    for (Sample sample : all) {
+      double temperature = sample.state().temperature();
+      double inner = sample.z()[GasWallSystem.INNER_SURFACE];
+      double outer = system.outerSurface(sample.z());
+      hottest = Math.max(hottest, temperature);
+      coldest = Math.min(coldest, temperature);
+      highest = Math.max(highest, sample.pressure());
+      lowest = Math.min(lowest, sample.pressure());
+      hottestWall = Math.max(hottestWall, Math.max(inner, outer));
+      coldestWall = Math.min(coldestWall, Math.min(inner, outer));
+    }
+    return new Path(
+        samples.stream().map(this::point).toList(),
+        hottest,
+        coldest,
+        highest,
+        lowest,
+        OptionalDouble.of(hottestWall),
+        OptionalDouble.of(coldestWall));
+  }
+
+  private PathPoint point(Sample sample) {
+    double[] z = sample.z();
+    boolean rigid = system.content() instanceof Content.Rigid;
+    return new PathPoint(
+        sample.time(),
+        sample.pressure(),
+        z[GasWallSystem.TEMPERATURE],
+        system.content().amount(z[GasWallSystem.EXTENT]) * gas.molarMass(),
+        rigid ? sample.rate() * gas.molarMass() : 0,
+        OptionalDouble.of(z[GasWallSystem.INNER_SURFACE]),
+        OptionalDouble.of(wall.meanTemperature(system.cells(z))));
+  }
+
+  /** What the vessel holds at the end; empty after the compression of trapped gas. */
+  Optional<VesselCondition> end() {
+    if (!(system.content() instanceof Content.Rigid rigid)) {
+      return Optional.empty();
+    }
+    double[] z = last().z();
+    List<Double> cells = new ArrayList<>();
+    for (double cell : system.cells(z)) {
+      cells.add(cell);
+    }
+    return Optional.of(
+        new VesselCondition(
+            rigid.vesselVolume(), z[GasWallSystem.EXTENT], z[GasWallSystem.TEMPERATURE], cells));
+  }
+
+  private double[] consistent(double time, double[] z) {
+    system.makeConsistent(time, z);
+    return z;
+  }
+
+  private Sample sample(double time, double[] z) {
+    State state = system.gas(z);
+    double[] rates = new double[z.length];
+    system.rates(time, z, rates);
+    double pressure = opening instanceof Opening.Ramp ramp ? ramp.pressure(time) : state.pressure();
+    return new Sample(time, z, state, pressure, rates[GasWallSystem.EXTENT]);
+  }
+}
