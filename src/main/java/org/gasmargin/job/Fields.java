@@ -44,21 +44,26 @@ final class Fields {
     return Optional.of(new Fields(owner, values, issues));
   }
 
+  /**
+   * Reports keys that are not known. One that is nearly a known key that is missing is then read as
+   * that key, so that the slip is reported once and its value is checked as well.
+   */
   private Fields refuseOthersThan(Set<String> known) {
-    List<String> free = new ArrayList<>(known);
-    free.removeAll(values.keySet());
-    values.forEach(
-        (key, value) -> {
-          if (!known.contains(key)) {
-            issues.add(
-                value.key(),
-                "unknown key " + Printable.quote(key) + " " + owner.within(),
-                NearestName.of(key, free)
-                    .map(name -> "did you mean '" + name + "'?")
-                    .orElse(
-                        "known here are " + String.join(", ", known.stream().sorted().toList())));
-          }
-        });
+    List<String> missing = new ArrayList<>(known);
+    missing.removeAll(values.keySet());
+    for (Map.Entry<String, Value> entry : List.copyOf(values.entrySet())) {
+      if (!known.contains(entry.getKey())) {
+        Optional<String> meant = NearestName.of(entry.getKey(), missing);
+        issues.add(
+            entry.getValue().key(),
+            "unknown key " + Printable.quote(entry.getKey()) + " " + owner.within(),
+            meant
+                .map(name -> "did you mean '" + name + "'?")
+                .orElse("known here are " + String.join(", ", known.stream().sorted().toList())));
+        meant.ifPresent(name -> values.putIfAbsent(name, entry.getValue()));
+        meant.ifPresent(missing::remove);
+      }
+    }
     return this;
   }
 
@@ -80,8 +85,20 @@ final class Fields {
 
   /** The field, or empty after an issue was added. */
   Optional<Value> need(String key) {
+    return need(key, "");
+  }
+
+  /**
+   * The same with an example of what is missing.
+   *
+   * @param example a value for the key, or an empty text
+   */
+  Optional<Value> need(String key, String example) {
     if (!has(key)) {
-      issues.add(owner.key(), "missing key '" + key + "' " + owner.within());
+      issues.add(
+          owner.key(),
+          "missing key '" + key + "' " + owner.within(),
+          example.isEmpty() ? "" : "write for example \"" + key + ": " + example + "\"");
     }
     return find(key);
   }

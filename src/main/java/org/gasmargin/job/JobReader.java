@@ -107,7 +107,7 @@ public final class JobReader {
         fields.has("judge_on")
             ? fields
                 .find("judge_on")
-                .flatMap(value -> Texts.choice(value, JUDGE_ON.keySet(), issues))
+                .flatMap(value -> Texts.choice(value, "word", JUDGE_ON.keySet(), issues))
                 .map(JUDGE_ON::get)
             : Optional.of(JudgeOn.BOUNDS);
     confirmations.refuseUnasked();
@@ -139,7 +139,7 @@ public final class JobReader {
   private List<String> rules(Value value, Issues issues) {
     List<String> names = new ArrayList<>();
     for (Value item : Lists.items(value, 0, MOST_RULE_PACKS, issues)) {
-      Texts.choice(item, rulePacks, issues).ifPresent(names::add);
+      Texts.choice(item, "rule pack", rulePacks, issues).ifPresent(names::add);
     }
     return names;
   }

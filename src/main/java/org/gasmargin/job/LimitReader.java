@@ -30,6 +30,7 @@ final class LimitReader {
               for (LimitKind kind : LimitKind.values()) {
                 fields.find(kind.key()).flatMap(one -> limit(one, kind)).ifPresent(limits::add);
               }
+              LimitOrder.check(fields, limits, issues);
             });
     return limits;
   }

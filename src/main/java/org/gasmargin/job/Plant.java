@@ -1,9 +1,11 @@
 package org.gasmargin.job;
 
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import org.gasmargin.process.Supply;
 import org.gasmargin.vessel.Vessel;
 
@@ -12,8 +14,12 @@ import org.gasmargin.vessel.Vessel;
  * that a step that names it is not reported as well.
  */
 final class Plant {
+  static final String VESSEL = "vessel";
+  static final String SUPPLY = "supply";
+
   private final Map<String, Optional<Vessel>> vessels = new LinkedHashMap<>();
   private final Map<String, Optional<Supply>> supplies = new LinkedHashMap<>();
+  private final Set<String> unreadable = new HashSet<>();
   private final Issues issues;
 
   Plant(Issues issues) {
@@ -26,6 +32,11 @@ final class Plant {
 
   void putSupply(String name, Optional<Supply> supply) {
     supplies.put(name, supply);
+  }
+
+  /** Notes that vessels or supplies could not be read at all, so that no name is unknown. */
+  void markUnreadable(String what) {
+    unreadable.add(what);
   }
 
   /** The vessels that could be read, in the order of the file. */
@@ -45,7 +56,7 @@ final class Plant {
   /** The name of the vessel on which a step acts: the one named, or the only one. */
   Optional<String> vesselOf(Fields step) {
     if (step.has("vessel")) {
-      return step.find("vessel").flatMap(value -> known(value, "vessel", vesselNames()));
+      return step.find("vessel").flatMap(value -> known(value, VESSEL, vesselNames()));
     }
     if (vessels.size() > 1) {
       issues.add(
@@ -58,14 +69,16 @@ final class Plant {
 
   /** The supply that a value names. */
   Optional<Supply> supply(Value value) {
-    return known(value, "supply", List.copyOf(supplies.keySet()))
+    return known(value, SUPPLY, List.copyOf(supplies.keySet()))
         .flatMap(name -> supplies.getOrDefault(name, Optional.empty()));
   }
 
   private Optional<String> known(Value value, String what, List<String> names) {
     Optional<String> name = Texts.word(value, issues);
     if (name.isPresent() && !names.contains(name.get())) {
-      Texts.unknown(value, what, name.get(), names, issues);
+      if (!unreadable.contains(what)) {
+        Texts.unknown(value, what, name.get(), names, issues);
+      }
       return Optional.empty();
     }
     return name;

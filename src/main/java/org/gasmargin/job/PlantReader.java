@@ -31,7 +31,7 @@ final class PlantReader {
   /** Puts the vessels into the plant and gives their limits by name. */
   Map<String, List<Limit>> readVessels(Value value, Optional<Site> site) {
     Map<String, List<Limit>> limits = new LinkedHashMap<>();
-    named(value)
+    named(value, Plant.VESSEL)
         .forEach(
             (name, one) -> {
               plant.put(name, Optional.empty());
@@ -54,7 +54,7 @@ final class PlantReader {
 
   /** Puts the supplies into the plant. */
   void readSupplies(Value value) {
-    named(value).forEach((name, one) -> plant.putSupply(name, supply(name, one)));
+    named(value, Plant.SUPPLY).forEach((name, one) -> plant.putSupply(name, supply(name, one)));
   }
 
   private Optional<Supply> supply(String name, Value value) {
@@ -69,13 +69,16 @@ final class PlantReader {
             });
   }
 
-  private Map<String, Value> named(Value value) {
-    Map<String, Value> all = Fields.named(value, issues).map(Fields::all).orElse(Map.of());
+  private Map<String, Value> named(Value value, String what) {
+    Optional<Map<String, Value>> read = Fields.named(value, issues).map(Fields::all);
+    Map<String, Value> all = read.orElse(Map.of());
     all.forEach((name, one) -> Texts.isName(one, name, issues));
-    boolean isMap = value.node() instanceof YamlNode.Table;
-    if (isMap && (all.isEmpty() || all.size() > MOST)) {
+    if (read.isPresent() && (all.isEmpty() || all.size() > MOST)) {
       issues.add(
           value.key(), value.path() + " holds " + all.size() + ", 1 to " + MOST + " were expected");
+    }
+    if (all.isEmpty() || all.size() > MOST) {
+      plant.markUnreadable(what);
       return Map.of();
     }
     return all;

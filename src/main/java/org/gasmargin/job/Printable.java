@@ -1,6 +1,9 @@
 package org.gasmargin.job;
 
+import java.util.Locale;
+import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import org.gasmargin.units.Place;
 
 /** Text of unknown origin made harmless for a terminal and a page. */
 final class Printable {
@@ -9,6 +12,7 @@ final class Printable {
       "[\\p{Cc}\\p{Cs}\\p{Zl}\\p{Zp}\\u202A-\\u202E\\u2066-\\u2069\\uFEFF]";
 
   private static final Pattern HIDDEN_CHARACTER = Pattern.compile(HIDDEN);
+  private static final Pattern CONTROL = Pattern.compile("[\\p{Cc}\\p{Cs}&&[^\t\n\r]]");
   private static final int LONGEST_LINE = 400;
   private static final int LONGEST_QUOTE = 40;
 
@@ -28,5 +32,25 @@ final class Printable {
 
   static boolean hasHidden(String text) {
     return HIDDEN_CHARACTER.matcher(text).find();
+  }
+
+  /**
+   * Whether a file holds a control character other than line ends and tabs; adds an issue if so.
+   */
+  static boolean findsControl(String file, String text, Issues issues) {
+    Matcher control = CONTROL.matcher(text);
+    if (!control.find()) {
+      return false;
+    }
+    String before = text.substring(0, control.start());
+    int line = (int) before.chars().filter(letter -> letter == '\n').count() + 1;
+    int start = before.lastIndexOf('\n') + 1;
+    issues.add(
+        new Place(file, line, before.codePointCount(start, before.length()) + 1),
+        String.format(
+            Locale.ROOT,
+            "the character U+%04X cannot stand in a job file",
+            control.group().codePointAt(0)));
+    return true;
   }
 }

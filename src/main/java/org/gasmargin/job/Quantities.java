@@ -79,14 +79,14 @@ final class Quantities {
 
   /** The quantity under a key that must be there. */
   Optional<Quantity> needed(Fields fields, String key, InputKind kind) {
-    return fields.need(key).flatMap(value -> quantity(value, kind));
+    return fields.need(key, kind.dimension().example()).flatMap(value -> quantity(value, kind));
   }
 
   /** A quantity that is given as a map, {@code value} with the place where it was read. */
   Optional<Sourced> sourced(Fields fields, InputKind kind) {
     Optional<String> readFrom = fields.find("read_from").flatMap(text -> Texts.word(text, issues));
     return fields
-        .need("value")
+        .need("value", kind.dimension().example())
         .flatMap(value -> plain(value, fields.owner().path(), readFrom, kind))
         .map(quantity -> new Sourced(quantity, readFrom));
   }
@@ -105,7 +105,7 @@ final class Quantities {
     try {
       Quantity quantity = new QuantityParser(zeroOfGauges).parse(text.value(), kind.dimension());
       read.add(new Read(new Entry(path, quantity.typed(), readFrom, value.place()), quantity));
-      Soundness soundness = new Soundness(issues, confirmations, atmosphere.nominal());
+      Soundness soundness = new Soundness(issues, confirmations);
       return soundness.holds(quantity, kind, path, value.place())
           ? Optional.of(quantity)
           : Optional.empty();

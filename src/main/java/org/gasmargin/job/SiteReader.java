@@ -17,22 +17,8 @@ final class SiteReader {
               Optional<Quantity> ambient =
                   quantities.needed(fields, "ambient_temperature", InputKind.AMBIENT_TEMPERATURE);
               Optional<Quantity> atmosphere =
-                  fields.need("atmospheric_pressure").flatMap(v -> barometer(v, quantities));
+                  quantities.needed(fields, "atmospheric_pressure", InputKind.ATMOSPHERIC_PRESSURE);
               return ambient.flatMap(t -> atmosphere.map(p -> new Site(t.si(), p.si())));
             });
-  }
-
-  private static Optional<Quantity> barometer(Value value, Quantities quantities) {
-    Optional<Quantity> read = quantities.quantity(value, InputKind.ATMOSPHERIC_PRESSURE);
-    if (read.filter(pressure -> pressure.unit().isGauge()).isPresent()) {
-      quantities
-          .issues()
-          .add(
-              value.place(),
-              "the atmosphere itself cannot be a gauge pressure",
-              "write for example \"1.013 bar(a)\"");
-      return Optional.empty();
-    }
-    return read;
   }
 }

@@ -9,16 +9,21 @@ import org.gasmargin.units.Quantity;
 final class Soundness {
   private final Issues issues;
   private final Confirmations confirmations;
-  private final double atmosphere;
 
-  Soundness(Issues issues, Confirmations confirmations, double atmosphere) {
+  Soundness(Issues issues, Confirmations confirmations) {
     this.issues = issues;
     this.confirmations = confirmations;
-    this.atmosphere = atmosphere;
   }
 
   /** Whether the value can be used; if not, or if it needs confirmation, an issue says so. */
   boolean holds(Quantity quantity, InputKind kind, String path, Place place) {
+    if (kind == InputKind.ATMOSPHERIC_PRESSURE && quantity.unit().isGauge()) {
+      issues.add(
+          place,
+          "the atmosphere itself cannot be a gauge pressure",
+          "write for example \"1.013 bar(a)\"");
+      return false;
+    }
     if (!quantity.si().isExact() && !kind.isTolerant()) {
       issues.add(
           place,
@@ -64,7 +69,7 @@ final class Soundness {
     boolean high = value > kind.usualHigh();
     Dimension dimension = kind.dimension();
     String edge =
-        DisplayUnits.of(quantity.unit(), atmosphere)
+        DisplayUnits.of(quantity.unit().absolute(), 0)
             .format(high ? kind.usualHigh() : kind.usualLow(), dimension);
     confirmations.ask(
         path,

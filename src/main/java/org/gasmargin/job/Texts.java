@@ -21,7 +21,7 @@ final class Texts {
           "a text was expected for " + value.path() + ", not " + value.node().noun());
       return Optional.empty();
     }
-    if (text.value().length() > LONGEST) {
+    if (text.value().codePointCount(0, text.value().length()) > LONGEST) {
       issues.add(value.place(), value.path() + " is longer than " + LONGEST + " letters");
       return Optional.empty();
     }
@@ -42,13 +42,18 @@ final class Texts {
     return text.filter(letters -> !letters.isEmpty());
   }
 
-  /** One of some words. */
-  static Optional<String> choice(Value value, Collection<String> words, Issues issues) {
+  /**
+   * One of some words.
+   *
+   * @param what the words are, for messages
+   */
+  static Optional<String> choice(
+      Value value, String what, Collection<String> words, Issues issues) {
     return word(value, issues)
         .flatMap(
             typed -> {
               if (!words.contains(typed)) {
-                unknown(value, "name", typed, words, issues);
+                unknown(value, what, typed, words, issues);
                 return Optional.empty();
               }
               return Optional.of(typed);

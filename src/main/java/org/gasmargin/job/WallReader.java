@@ -110,7 +110,7 @@ final class WallReader {
       return Fields.of(value, issues, "film_coefficient")
           .flatMap(fields -> film(fields, InsideFilm.Given::new));
     }
-    return Texts.choice(value, List.of(CORRELATION), issues)
+    return Texts.choice(value, "heat transfer", List.of(CORRELATION), issues)
         .map(word -> new InsideFilm.Correlation());
   }
 
@@ -122,7 +122,8 @@ final class WallReader {
       issues.add(value.place(), "wind needs its speed", "write {wind: 3 m/s}");
       return Optional.empty();
     }
-    return Texts.choice(value, OUTSIDE_WORDS.keySet(), issues).map(OUTSIDE_WORDS::get);
+    return Texts.choice(value, "surroundings", OUTSIDE_WORDS.keySet(), issues)
+        .map(OUTSIDE_WORDS::get);
   }
 
   private Optional<OutsideFilm> outsideByNumber(Fields fields) {

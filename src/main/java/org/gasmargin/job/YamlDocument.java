@@ -41,6 +41,9 @@ final class YamlDocument {
 
   /** The document, or empty after an issue was added. An empty file has no document. */
   static Optional<YamlNode> read(String file, String text, Issues issues) {
+    if (Printable.findsControl(file, text, issues)) {
+      return Optional.empty();
+    }
     YamlDocument document = new YamlDocument(file, issues);
     LoadSettings settings = LoadSettings.builder().setLabel("job").setUseMarks(true).build();
     try {
@@ -51,13 +54,28 @@ final class YamlDocument {
       }
     } catch (MarkedYamlEngineException e) {
       Place place = e.getProblemMark().map(document::place).orElse(new Place(file, 1, 1));
-      issues.add(place, "this is not YAML: " + e.getProblem());
+      issues.add(place, "this is not YAML: " + e.getProblem() + document.context(e));
       return Optional.empty();
     } catch (YamlEngineException e) {
       issues.add(new Place(file, 1, 1), "this is not YAML: " + e.getMessage());
       return Optional.empty();
     }
     return document.root;
+  }
+
+  private String context(MarkedYamlEngineException error) {
+    return error
+        .getContextMark()
+        .map(this::place)
+        .map(
+            begin ->
+                " "
+                    + error.getContext()
+                    + " from line "
+                    + begin.line()
+                    + ", column "
+                    + begin.column())
+        .orElse("");
   }
 
   /** Takes one event and tells whether to go on. */

@@ -185,6 +185,11 @@ public enum Unit {
     };
   }
 
+  /** The same unit counted from zero if it is a gauge unit, else the unit itself. */
+  public Unit absolute() {
+    return gauge ? valueOf(name().replaceFirst("_GAUGE$", "_ABSOLUTE")) : this;
+  }
+
   /** The unit of that dimension with that spelling, see {@link UnitSpelling#normal}. */
   public static Optional<Unit> find(String spelling, Dimension dimension) {
     String normal = UnitSpelling.normal(spelling);

@@ -184,6 +184,23 @@ class JobReaderTest {
     assertEquals(0.1, slower.within());
   }
 
+  @Test
+  void anUnusualValueIsTakenOnceItIsConfirmed() {
+    String text =
+        BrokenJobs.text("two-thousand-bar")
+            + "confirmed: [vessels.receiver.limits.max_pressure]\n";
+    Job job = Jobs.READER.read("job.yaml", text);
+    assertInterval(2000e5 + ATMOSPHERE, Jobs.limits(job, "receiver").get(0).value().si());
+  }
+
+  @Test
+  void aGaugeLimitCountsFromTheNominalAtmosphereAndAGaugeReadingFromItsTolerance() {
+    Job job = Jobs.READER.read("job.yaml", Jobs.sampleText("receiver-blow-down"));
+    assertInterval(45e5 + 1e5, Jobs.limits(job, "receiver").get(0).value().si());
+    assertInterval(
+        39.5e5 + 0.98e5, 40e5 + 1e5, 40.5e5 + 1.02e5, job.procedure().vessels().get(0).startPressure());
+  }
+
   @ParameterizedTest
   @ValueSource(strings = {"receiver-top-up", "oxygen-ball-valve", "receiver-blow-down"})
   void readsTheSampleJobsFromTheirFiles(String name) {
