@@ -187,8 +187,7 @@ class JobReaderTest {
   @Test
   void anUnusualValueIsTakenOnceItIsConfirmed() {
     String text =
-        BrokenJobs.text("two-thousand-bar")
-            + "confirmed: [vessels.receiver.limits.max_pressure]\n";
+        BrokenJobs.text("two-thousand-bar") + "confirmed: [vessels.receiver.limits.max_pressure]\n";
     Job job = Jobs.READER.read("job.yaml", text);
     assertInterval(2000e5 + ATMOSPHERE, Jobs.limits(job, "receiver").get(0).value().si());
   }
@@ -198,7 +197,10 @@ class JobReaderTest {
     Job job = Jobs.READER.read("job.yaml", Jobs.sampleText("receiver-blow-down"));
     assertInterval(45e5 + 1e5, Jobs.limits(job, "receiver").get(0).value().si());
     assertInterval(
-        39.5e5 + 0.98e5, 40e5 + 1e5, 40.5e5 + 1.02e5, job.procedure().vessels().get(0).startPressure());
+        39.5e5 + 0.98e5,
+        40e5 + 1e5,
+        40.5e5 + 1.02e5,
+        job.procedure().vessels().get(0).startPressure());
   }
 
   @ParameterizedTest
