@@ -1,20 +1,26 @@
 package org.gasmargin.job;
 
-import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import org.gasmargin.gas.Gas;
+import org.gasmargin.gas.catalogue.GasCatalogue;
+import org.gasmargin.gas.catalogue.GasSummary;
+import org.gasmargin.units.Place;
 import org.gasmargin.units.Quantity;
 
 /** Reads {@code gas}: a name, or a map of names with their shares. */
 final class GasReader {
   private static final double ROUNDING = 1e-4;
 
-  private final GasNames gases;
+  private final GasCatalogue gases;
   private final Quantities quantities;
   private final Issues issues;
 
-  GasReader(GasNames gases, Quantities quantities) {
+  GasReader(GasCatalogue gases, Quantities quantities) {
     this.gases = gases;
     this.quantities = quantities;
     issues = quantities.issues();
@@ -26,52 +32,58 @@ final class GasReader {
   }
 
   private Optional<Gas> pure(Value value) {
-    return Texts.word(value, issues).flatMap(name -> find(value, name));
+    return Texts.word(value, issues).flatMap(name -> find(value.place(), value.path(), name));
   }
 
-  private Optional<Gas> find(Value value, String name) {
-    Optional<Gas> gas = gases.find().apply(name);
+  private Optional<Gas> find(Place place, String path, String name) {
+    Optional<Gas> gas = gases.find(name);
     if (gas.isEmpty()) {
-      Texts.unknown(value, "gas", name, gases.names(), issues);
+      List<String> near = gases.suggestions(name);
+      issues.add(
+          place,
+          "unknown gas " + Printable.quote(name) + " for " + path,
+          near.isEmpty()
+              ? "known are " + String.join(", ", gases.list().stream().map(GasSummary::id).toList())
+              : "did you mean '" + near.get(0) + "'?");
     }
     return gas;
   }
 
   private Optional<Gas> mixture(Value value) {
-    Fields fields = Fields.named(value, issues).orElseThrow();
-    Map<Gas, Double> shares = new LinkedHashMap<>();
-    for (Map.Entry<String, Value> component : fields.all().entrySet()) {
-      Value typed = component.getValue();
-      Optional<Gas> gas =
-          find(
-              new Value(value.path(), typed.key(), keyNode(typed, component.getKey())),
-              component.getKey());
-      Optional<Quantity> share = quantities.quantity(typed, InputKind.SHARE);
-      gas.ifPresent(
-          found -> share.ifPresent(part -> shares.merge(found, part.si().nominal(), Double::sum)));
+    Map<String, Value> components = Fields.named(value, issues).map(Fields::all).orElseThrow();
+    if (components.isEmpty()) {
+      issues.add(value.place(), value.path() + " names no gas");
     }
-    if (shares.size() < fields.all().size() || shares.isEmpty()) {
-      if (fields.all().isEmpty()) {
-        issues.add(value.place(), value.path() + " names no gas");
+    Set<Gas> found = new LinkedHashSet<>();
+    double sum = 0;
+    int complete = 0;
+    for (Map.Entry<String, Value> component : components.entrySet()) {
+      Value share = component.getValue();
+      Optional<Gas> gas = find(share.key(), value.path(), component.getKey());
+      Optional<Quantity> part = quantities.quantity(share, InputKind.SHARE);
+      if (gas.isPresent() && part.isPresent()) {
+        found.add(gas.get());
+        sum += part.get().si().nominal();
+        complete++;
       }
-      return Optional.empty();
     }
-    return whole(value, shares);
+    return complete == components.size() && complete > 0
+        ? single(value, found, sum)
+        : Optional.empty();
   }
 
-  private Optional<Gas> whole(Value value, Map<Gas, Double> shares) {
-    double sum = shares.values().stream().mapToDouble(Double::doubleValue).sum();
+  private Optional<Gas> single(Value value, Set<Gas> found, double sum) {
     if (Math.abs(sum - 1) > ROUNDING) {
       issues.add(
           value.place(),
           String.format(
-              java.util.Locale.ROOT,
+              Locale.ROOT,
               "the shares of %s add up to %.4g %%, not to 100 %%",
               value.path(),
               sum * 100));
       return Optional.empty();
     }
-    if (shares.size() > 1) {
+    if (found.size() > 1) {
       issues.add(
           value.place(),
           "mixtures of gases are not computed by this version, and a mixture is never treated as"
@@ -79,10 +91,6 @@ final class GasReader {
           "name one gas, for example \"gas: air\"");
       return Optional.empty();
     }
-    return shares.keySet().stream().findFirst();
-  }
-
-  private static YamlNode keyNode(Value typed, String name) {
-    return new YamlNode.Text(typed.key(), name, false);
+    return found.stream().findFirst();
   }
 }

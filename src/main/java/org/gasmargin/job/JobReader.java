@@ -6,6 +6,7 @@ import java.util.Collection;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import org.gasmargin.gas.catalogue.GasCatalogue;
 import org.gasmargin.process.Procedure;
 import org.gasmargin.process.Site;
 import org.gasmargin.process.Step;
@@ -25,7 +26,7 @@ public final class JobReader {
   private static final Map<String, JudgeOn> JUDGE_ON =
       Map.of("bounds", JudgeOn.BOUNDS, "modelled", JudgeOn.MODELLED);
 
-  private final GasNames gases;
+  private final GasCatalogue gases;
   private final MaterialCatalogue materials;
   private final List<String> rulePacks;
 
@@ -34,7 +35,7 @@ public final class JobReader {
    * @param materials the wall materials that a job can name
    * @param rulePacks the names of all rule packs
    */
-  public JobReader(GasNames gases, MaterialCatalogue materials, Collection<String> rulePacks) {
+  public JobReader(GasCatalogue gases, MaterialCatalogue materials, Collection<String> rulePacks) {
     this.gases = gases;
     this.materials = materials;
     this.rulePacks = List.copyOf(rulePacks);

@@ -185,6 +185,14 @@ class JobReaderTest {
   }
 
   @Test
+  void sharesOfOneGasUnderTwoNamesAreThatGas() {
+    String text =
+        Jobs.text("/jobs/sketch.yaml").replace("gas: air", "gas: {nitrogen: 60 %, N2: 40 %}");
+    Job job = Jobs.READER.read("job.yaml", text);
+    assertEquals("nitrogen", job.procedure().vessels().get(0).gas().id());
+  }
+
+  @Test
   void anUnusualValueIsTakenOnceItIsConfirmed() {
     String text =
         BrokenJobs.text("two-thousand-bar") + "confirmed: [vessels.receiver.limits.max_pressure]\n";

@@ -7,6 +7,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import org.gasmargin.gas.catalogue.GasCatalogue;
 import org.gasmargin.rules.Limit;
 import org.gasmargin.vessel.MaterialCatalogue;
 import org.gasmargin.vessel.Vessel;
@@ -16,7 +17,7 @@ final class Jobs {
   static final List<String> RULE_PACKS =
       List.of("general", "cylinder_fill", "oxygen", "hydrogen", "cold_vent");
   static final JobReader READER =
-      new JobReader(NamedGas.GASES, MaterialCatalogue.load(), RULE_PACKS);
+      new JobReader(new GasCatalogue(), MaterialCatalogue.load(), RULE_PACKS);
 
   private Jobs() {}
 
