@@ -1,5 +1,7 @@
 package org.gasmargin.rules;
 
+import java.util.Arrays;
+import java.util.Optional;
 import org.gasmargin.units.Dimension;
 
 /** The limits that a job can state for a vessel. */
@@ -31,5 +33,15 @@ public enum LimitKind {
   /** What the limit measures. */
   public Dimension dimension() {
     return dimension;
+  }
+
+  /** Whether the limit is a lowest value; if not, it is a highest one. */
+  public boolean isMinimum() {
+    return this == MIN_PRESSURE || this == MIN_GAS_TEMPERATURE || this == MIN_METAL_TEMPERATURE;
+  }
+
+  /** The limit with a key. */
+  public static Optional<LimitKind> of(String key) {
+    return Arrays.stream(values()).filter(kind -> kind.key.equals(key)).findFirst();
   }
 }
