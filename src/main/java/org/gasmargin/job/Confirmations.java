@@ -1,10 +1,13 @@
 package org.gasmargin.job;
 
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import org.gasmargin.units.Entry;
 import org.gasmargin.units.NearestName;
 import org.gasmargin.units.Place;
 
@@ -17,6 +20,7 @@ final class Confirmations {
   static final int MOST = 100;
 
   private final Map<String, Place> given = new LinkedHashMap<>();
+  private final List<Entry> entries = new ArrayList<>();
   private final Set<String> asked = new LinkedHashSet<>();
   private final Issues issues;
 
@@ -27,8 +31,17 @@ final class Confirmations {
   /** Reads the list of paths. */
   void read(Value list) {
     for (Value item : Lists.items(list, 0, MOST, issues)) {
-      Texts.word(item, issues).ifPresent(path -> given.putIfAbsent(path, item.place()));
+      Optional<String> path = Texts.word(item, issues);
+      if (path.isPresent()) {
+        given.putIfAbsent(path.get(), item.place());
+        entries.add(new Entry(item.path(), path.get(), Optional.empty(), item.place()));
+      }
     }
+  }
+
+  /** What the user confirmed, for the list of inputs that a reviewer sees. */
+  List<Entry> entries() {
+    return entries;
   }
 
   /** Adds the question as an issue unless the user has answered it. */

@@ -115,9 +115,11 @@ final class Quantities {
     }
   }
 
-  /** All quantities as typed, in the order of the file. */
+  /** All quantities and confirmations as typed, in the order of the file. */
   List<Entry> entries() {
-    return inOrder().map(Read::entry).toList();
+    return Stream.concat(read.stream().map(Read::entry), confirmations.entries().stream())
+        .sorted(Comparator.comparing(Entry::place, PlaceOrder.IN_FILE))
+        .toList();
   }
 
   /**
@@ -125,7 +127,10 @@ final class Quantities {
    */
   DisplayUnits displayUnits() {
     Map<Dimension, Unit> units = new EnumMap<>(Dimension.class);
-    List<Read> ordered = inOrder().toList();
+    List<Read> ordered =
+        read.stream()
+            .sorted(Comparator.comparing(one -> one.entry().place(), PlaceOrder.IN_FILE))
+            .toList();
     for (boolean atSite : new boolean[] {false, true}) {
       for (Read one : ordered) {
         if (one.entry().path().startsWith("site.") == atSite) {
@@ -134,12 +139,5 @@ final class Quantities {
       }
     }
     return new DisplayUnits(units, atmosphere.nominal());
-  }
-
-  private Stream<Read> inOrder() {
-    return read.stream()
-        .sorted(
-            Comparator.comparingInt((Read one) -> one.entry().place().line())
-                .thenComparingInt(one -> one.entry().place().column()));
   }
 }

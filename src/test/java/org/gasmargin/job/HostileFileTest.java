@@ -4,6 +4,7 @@ import static java.nio.charset.StandardCharsets.UTF_8;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTimeoutPreemptively;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.IOException;
 import java.nio.file.Files;
@@ -59,6 +60,18 @@ class HostileFileTest {
   void aTitleOfTwoHundredKilobytesIsNotRepeatedInItsError(@TempDir Path folder) throws IOException {
     String line = refusal(folder, ("job: {title: " + "x".repeat(200_000) + "}").getBytes(UTF_8));
     assertEquals(":1:1: missing key 'site' at the top of the file", line);
+  }
+
+  @Test
+  void ofThousandsOfErrorsTheFirstHundredAreTold() {
+    StringBuilder text = new StringBuilder();
+    for (int i = 0; i < 5000; i++) {
+      text.append("key").append(i).append(": 1\n");
+    }
+    List<Issue> issues =
+        assertThrows(JobErrors.class, () -> Jobs.READER.read("job.yaml", text.toString())).issues();
+    assertEquals(101, issues.size());
+    assertTrue(issues.get(100).toString().endsWith(": and 4904 more errors from here on"));
   }
 
   @Test

@@ -198,6 +198,9 @@ class JobReaderTest {
         BrokenJobs.text("two-thousand-bar") + "confirmed: [vessels.receiver.limits.max_pressure]\n";
     Job job = Jobs.READER.read("job.yaml", text);
     assertInterval(2000e5 + ATMOSPHERE, Jobs.limits(job, "receiver").get(0).value().si());
+    Entry last = job.entries().get(job.entries().size() - 1);
+    assertEquals("confirmed.1", last.path());
+    assertEquals("vessels.receiver.limits.max_pressure", last.typed());
   }
 
   @Test
