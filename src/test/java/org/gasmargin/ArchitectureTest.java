@@ -37,6 +37,8 @@ class ArchitectureTest {
         .definedBy("org.gasmargin.vessel..")
         .layer("gas")
         .definedBy("org.gasmargin.gas..")
+        .layer("yaml")
+        .definedBy("org.gasmargin.yaml..")
         .layer("units")
         .definedBy("org.gasmargin.units..")
         .withOptionalLayers(true)
@@ -56,6 +58,8 @@ class ArchitectureTest {
         .mayOnlyBeAccessedByLayers("cli", "worksheet", "job", "rules", "process")
         .whereLayer("gas")
         .mayOnlyBeAccessedByLayers("cli", "worksheet", "job", "rules", "process", "flow", "vessel")
+        .whereLayer("yaml")
+        .mayOnlyBeAccessedByLayers("job", "rules")
         .check(CLASSES);
   }
 }

@@ -6,6 +6,9 @@ import org.gasmargin.process.Step;
 import org.gasmargin.process.Supply;
 import org.gasmargin.units.Interval;
 import org.gasmargin.units.Quantity;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Value;
 
 /** Reads {@code hold} and {@code compress}. */
 final class ClosedStepReader {

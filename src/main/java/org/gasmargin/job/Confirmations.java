@@ -10,6 +10,11 @@ import java.util.Set;
 import org.gasmargin.units.Entry;
 import org.gasmargin.units.NearestName;
 import org.gasmargin.units.Place;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Lists;
+import org.gasmargin.yaml.Printable;
+import org.gasmargin.yaml.Texts;
+import org.gasmargin.yaml.Value;
 
 /**
  * The user's answers to the reader's questions: paths of values that are unusual and meant. A

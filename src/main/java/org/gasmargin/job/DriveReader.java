@@ -4,6 +4,8 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.gasmargin.process.Drive;
 import org.gasmargin.units.Quantity;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
 
 /** Reads what sets the flow of a fill or a vent. */
 final class DriveReader {

@@ -5,6 +5,9 @@ import java.util.OptionalDouble;
 import org.gasmargin.process.Step;
 import org.gasmargin.process.Supply;
 import org.gasmargin.units.Quantity;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Value;
 
 /** Reads {@code fill}. */
 final class FillReader {

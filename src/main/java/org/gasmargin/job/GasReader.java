@@ -11,6 +11,12 @@ import org.gasmargin.gas.catalogue.GasCatalogue;
 import org.gasmargin.gas.catalogue.GasSummary;
 import org.gasmargin.units.Place;
 import org.gasmargin.units.Quantity;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Printable;
+import org.gasmargin.yaml.Texts;
+import org.gasmargin.yaml.Value;
+import org.gasmargin.yaml.YamlNode;
 
 /** Reads {@code gas}: a name, or a map of names with their shares. */
 final class GasReader {

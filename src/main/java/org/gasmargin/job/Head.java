@@ -1,6 +1,10 @@
 package org.gasmargin.job;
 
 import java.util.Optional;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Texts;
+import org.gasmargin.yaml.Value;
 
 /**
  * What a job is called.

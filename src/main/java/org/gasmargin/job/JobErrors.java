@@ -2,6 +2,7 @@ package org.gasmargin.job;
 
 import java.util.List;
 import java.util.stream.Collectors;
+import org.gasmargin.yaml.Issue;
 
 /** A job file that cannot be used, with everything that is wrong with it. */
 public final class JobErrors extends RuntimeException {

@@ -15,6 +15,14 @@ import org.gasmargin.rules.Limit;
 import org.gasmargin.units.Interval;
 import org.gasmargin.units.Place;
 import org.gasmargin.vessel.MaterialCatalogue;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Lists;
+import org.gasmargin.yaml.TextFile;
+import org.gasmargin.yaml.Texts;
+import org.gasmargin.yaml.Value;
+import org.gasmargin.yaml.YamlDocument;
+import org.gasmargin.yaml.YamlNode;
 
 /**
  * Reads a job file: YAML of known keys, quantities with their units, everything checked. All that
@@ -48,8 +56,8 @@ public final class JobReader {
    */
   public Job read(Path file) {
     Issues issues = new Issues();
-    Optional<String> text = JobFile.text(file, issues);
-    return read(file.toString(), text.orElseThrow(issues::errors));
+    Optional<String> text = TextFile.text(file, issues);
+    return read(file.toString(), text.orElseThrow(() -> new JobErrors(issues.sorted())));
   }
 
   /**
@@ -81,7 +89,7 @@ public final class JobReader {
                         "confirmed")
                     .flatMap(fields -> job(fields, text, issues)));
     if (!issues.isEmpty()) {
-      throw issues.errors();
+      throw new JobErrors(issues.sorted());
     }
     return job.orElseThrow();
   }

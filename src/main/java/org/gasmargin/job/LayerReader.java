@@ -6,6 +6,10 @@ import org.gasmargin.units.Quantity;
 import org.gasmargin.vessel.Layer;
 import org.gasmargin.vessel.Material;
 import org.gasmargin.vessel.MaterialCatalogue;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Texts;
+import org.gasmargin.yaml.Value;
 
 /** Reads one layer: a thickness with a material's name or with its three numbers. */
 final class LayerReader {

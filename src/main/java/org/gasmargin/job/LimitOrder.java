@@ -4,6 +4,8 @@ import java.util.List;
 import java.util.Optional;
 import org.gasmargin.rules.Limit;
 import org.gasmargin.rules.LimitKind;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
 
 /** Refuses limits of one vessel that leave nothing between them. */
 final class LimitOrder {

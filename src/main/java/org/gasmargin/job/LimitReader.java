@@ -7,6 +7,10 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.gasmargin.rules.Limit;
 import org.gasmargin.rules.LimitKind;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Value;
+import org.gasmargin.yaml.YamlNode;
 
 /** Reads {@code limits}: each a quantity, or {@code {value: ..., read_from: ..., margin: ...}}. */
 final class LimitReader {

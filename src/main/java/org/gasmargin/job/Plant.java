@@ -8,6 +8,10 @@ import java.util.Optional;
 import java.util.Set;
 import org.gasmargin.process.Supply;
 import org.gasmargin.vessel.Vessel;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Texts;
+import org.gasmargin.yaml.Value;
 
 /**
  * The vessels and supplies that steps can name. One that could not be read is there by its name, so

@@ -9,6 +9,10 @@ import org.gasmargin.process.Supply;
 import org.gasmargin.rules.Limit;
 import org.gasmargin.units.Quantity;
 import org.gasmargin.vessel.Vessel;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Texts;
+import org.gasmargin.yaml.Value;
 
 /** Reads {@code vessels} and {@code supplies}. */
 final class PlantReader {

@@ -7,6 +7,7 @@ import org.gasmargin.process.Supply;
 import org.gasmargin.units.Place;
 import org.gasmargin.units.Quantity;
 import org.gasmargin.vessel.Vessel;
+import org.gasmargin.yaml.Issues;
 
 /**
  * Follows the pressure of each vessel from step to step as far as the job file alone tells it, to

@@ -15,6 +15,12 @@ import org.gasmargin.units.Quantity;
 import org.gasmargin.units.QuantityError;
 import org.gasmargin.units.QuantityParser;
 import org.gasmargin.units.Unit;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.PlaceOrder;
+import org.gasmargin.yaml.Texts;
+import org.gasmargin.yaml.Value;
+import org.gasmargin.yaml.YamlNode;
 
 /** Reads quantities, keeps what was typed, and asks about values that look like a slip. */
 final class Quantities {

@@ -4,6 +4,7 @@ import org.gasmargin.units.Dimension;
 import org.gasmargin.units.DisplayUnits;
 import org.gasmargin.units.Place;
 import org.gasmargin.units.Quantity;
+import org.gasmargin.yaml.Issues;
 
 /** Refuses values that no equipment can have and asks about those that hardly any has. */
 final class Soundness {

@@ -3,6 +3,10 @@ package org.gasmargin.job;
 import java.util.ArrayList;
 import java.util.List;
 import org.gasmargin.process.Step;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Lists;
+import org.gasmargin.yaml.Value;
 
 /** Reads {@code steps}: a list of maps, each with the one word that names the kind of step. */
 final class StepReader {

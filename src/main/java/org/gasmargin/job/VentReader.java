@@ -3,6 +3,9 @@ package org.gasmargin.job;
 import java.util.Optional;
 import org.gasmargin.process.Step;
 import org.gasmargin.units.Quantity;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Value;
 
 /** Reads {@code vent}. */
 final class VentReader {

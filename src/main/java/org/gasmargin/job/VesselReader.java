@@ -10,6 +10,9 @@ import org.gasmargin.units.Quantity;
 import org.gasmargin.vessel.Vessel;
 import org.gasmargin.vessel.Wall;
 import org.gasmargin.vessel.WallShape;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Value;
 
 /** Reads one vessel with its start. Its limits are read by {@link LimitReader}. */
 final class VesselReader {

@@ -11,6 +11,12 @@ import org.gasmargin.vessel.Layer;
 import org.gasmargin.vessel.OutsideFilm;
 import org.gasmargin.vessel.Wall;
 import org.gasmargin.vessel.WallShape;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Lists;
+import org.gasmargin.yaml.Texts;
+import org.gasmargin.yaml.Value;
+import org.gasmargin.yaml.YamlNode;
 
 /** Reads {@code wall}: one shape, the layers from the inside, and the two films. */
 final class WallReader {

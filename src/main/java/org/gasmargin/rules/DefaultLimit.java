@@ -5,11 +5,14 @@ package org.gasmargin.rules;
  *
  * @param value gives the limit
  * @param source where the figure comes from
- * @param status how far it may be trusted
  */
-record DefaultLimit(Expression value, String source, SourceStatus status) {
+record DefaultLimit(Expression value, SourceText source) {
   /** Where the limit comes from, for a finding. */
   String origin() {
-    return "default of the rule, not of the job: " + source + " (" + status.words() + ")";
+    return "default of the rule, not of the job: "
+        + source.words()
+        + " ("
+        + source.status().words()
+        + ")";
   }
 }

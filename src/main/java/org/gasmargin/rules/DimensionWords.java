@@ -1,14 +1,11 @@
 package org.gasmargin.rules;
 
-import dev.cel.common.CelIssue;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import org.gasmargin.units.Dimension;
-import org.gasmargin.yaml.TextIssue;
-import org.gasmargin.yaml.YamlNode.Scalar;
 
 /** Says in plain words which dimensions do not go together. */
 final class DimensionWords {
@@ -18,13 +15,8 @@ final class DimensionWords {
 
   private DimensionWords() {}
 
-  static TextIssue of(Scalar source, CelIssue issue) {
-    int column = issue.getSourceLocation().getColumn();
-    return new TextIssue(
-        column < 0 ? source.place() : source.placeOf(column), words(issue.getMessage()));
-  }
-
-  private static String words(String message) {
+  /** The words for a message of the checker. */
+  static String of(String message) {
     Matcher match = NO_OVERLOAD.matcher(message);
     if (!match.matches()) {
       return message.lines().findFirst().orElse(message);

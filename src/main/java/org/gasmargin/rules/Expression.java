@@ -72,7 +72,7 @@ sealed interface Expression {
       for (String name : names) {
         Operand operand = operands.get(name);
         if (operand instanceof Operand.Figure figure) {
-          variables.put(name, ExpressionLanguage.asCelValue(figure.measure()));
+          variables.put(name, FunctionTable.asCelValue(figure.measure()));
           paths.add(figure.path());
         } else if (operand instanceof Operand.Truth truth) {
           variables.put(name, truth.holds());
@@ -93,7 +93,7 @@ sealed interface Expression {
         Object value = program.eval(variables);
         return value instanceof Boolean truth
             ? new Operand.Truth(truth)
-            : Operand.number(ExpressionLanguage.asMeasure(value), path, "the value of " + text);
+            : Operand.number(FunctionTable.asMeasure(value), path, "the value of " + text);
       } catch (CelEvaluationException e) {
         return new Operand.Unknown(text + " cannot be evaluated");
       }

@@ -59,13 +59,13 @@ record LimitInForce(double value, String origin, Operand requiredMargin, String 
         && rule.direction().isLooser(value, figure.si())) {
       notes
           .append("; the limit of the job is looser than ")
-          .append(view.units().format(figure.si(), rule.dimension()))
+          .append(view.units().format(figure.si(), rule.predicted().dimension()))
           .append(", the ")
           .append(rule.defaultLimit().orElseThrow().origin());
     }
     Operand margin = marginOfRule;
     if (limit.requiredMargin().isPresent()) {
-      Dimension difference = Arithmetic.differenceOf(rule.dimension());
+      Dimension difference = Arithmetic.differenceOf(rule.predicted().dimension());
       double asked = limit.requiredMargin().getAsDouble();
       margin =
           Operand.number(new Measure(difference, asked), "", "the margin that the job asks for");

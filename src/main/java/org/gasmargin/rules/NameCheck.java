@@ -3,16 +3,15 @@ package org.gasmargin.rules;
 import dev.cel.common.CelAbstractSyntaxTree;
 import dev.cel.common.ast.CelConstant;
 import dev.cel.common.ast.CelExpr;
-import java.util.ArrayList;
 import java.util.Arrays;
-import java.util.Collection;
 import java.util.List;
 import java.util.Set;
 import java.util.TreeSet;
 import java.util.stream.Stream;
 import org.gasmargin.units.NearestName;
-import org.gasmargin.yaml.TextIssue;
-import org.gasmargin.yaml.YamlNode.Scalar;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Printable;
+import org.gasmargin.yaml.YamlNode.Text;
 
 /**
  * Looks at every name, call and literal of a parsed expression before its dimensions are checked,
@@ -29,26 +28,30 @@ final class NameCheck {
           CelConstant.Kind.STRING_VALUE);
 
   private final CelAbstractSyntaxTree ast;
-  private final Scalar source;
+  private final Text source;
   private final Scope scope;
   private final Set<String> names = new TreeSet<>();
-  private final List<TextIssue> issues = new ArrayList<>();
+  private final Issues issues;
 
-  NameCheck(CelAbstractSyntaxTree ast, Scalar source, Scope scope) {
+  /**
+   * Looks at all nodes.
+   *
+   * @param ast the parsed expression
+   * @param source where it stands
+   * @param scope which names it may use
+   * @param issues receives what is not in the language
+   */
+  NameCheck(CelAbstractSyntaxTree ast, Text source, Scope scope, Issues issues) {
     this.ast = ast;
     this.source = source;
     this.scope = scope;
+    this.issues = issues;
     visit(ast.getExpr());
   }
 
   /** The names used. */
   Set<String> names() {
     return names;
-  }
-
-  /** What is not in the language. */
-  List<TextIssue> issues() {
-    return issues;
   }
 
   private void visit(CelExpr node) {
@@ -80,7 +83,12 @@ final class NameCheck {
     }
     String name = root.ident().name() + rest;
     if (!Vocabulary.all().contains(name)) {
-      refuse(root, "unknown name '" + name + "'" + suggestion(name, Vocabulary.all()));
+      issues.add(
+          source.placeOf(offset(root)),
+          "unknown name " + Printable.quote(name),
+          NearestName.of(name, Vocabulary.all())
+              .map(nearest -> "did you mean '" + nearest + "'?")
+              .orElse("docs/rules.md lists the names"));
     } else if (!scope.permits(name)) {
       refuse(root, "'" + name + "' cannot be used here, only " + scope.words());
     } else {
@@ -96,9 +104,10 @@ final class NameCheck {
     } else if (function.equals("-_")) {
       refuse(node, "a minus stands before a figure only, as in K(-5.0)");
     } else if (Character.isLetter(function.codePointAt(0)) && !FUNCTIONS.contains(function)) {
-      refuseAt(
-          startOfCall(node, function),
-          "unknown function '" + function + "'; there are " + String.join(", ", FUNCTIONS));
+      issues.add(
+          source.placeOf(startOfCall(node, function)),
+          "unknown function " + Printable.quote(function),
+          "there are " + String.join(", ", FUNCTIONS));
     }
     Stream.concat(call.target().stream(), call.args().stream()).forEach(this::visit);
   }
@@ -109,20 +118,10 @@ final class NameCheck {
   }
 
   private void refuse(CelExpr node, String problem) {
-    refuseAt(offset(node), problem);
-  }
-
-  private void refuseAt(int offset, String problem) {
-    issues.add(new TextIssue(source.placeOf(offset), problem));
+    issues.add(source.placeOf(offset(node)), problem);
   }
 
   private int offset(CelExpr node) {
     return ast.getSource().getPositionsMap().getOrDefault(node.id(), 0);
-  }
-
-  private static String suggestion(String typed, Collection<String> known) {
-    return NearestName.of(typed, known)
-        .map(nearest -> "; did you mean '" + nearest + "'?")
-        .orElse("");
   }
 }

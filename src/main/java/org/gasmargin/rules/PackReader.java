@@ -10,23 +10,25 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.gasmargin.units.Place;
-import org.gasmargin.yaml.TextIssue;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Lists;
+import org.gasmargin.yaml.Printable;
+import org.gasmargin.yaml.Texts;
+import org.gasmargin.yaml.Value;
+import org.gasmargin.yaml.YamlDocument;
 import org.gasmargin.yaml.YamlNode;
-import org.gasmargin.yaml.YamlNode.Mapping;
-import org.gasmargin.yaml.YamlNode.Scalar;
-import org.gasmargin.yaml.YamlReader;
-import org.gasmargin.yaml.YamlRefused;
+import org.gasmargin.yaml.YamlNode.Field;
 
 /** Reads one rule pack from its text. */
 final class PackReader {
-  private static final List<String> KEYS =
-      List.of("pack", "title", "asked_by", "asked_in_words", "deference", "rules");
+  private static final int MOST_RULES = 200;
 
-  private final ExpressionLanguage language;
-  private final List<TextIssue> issues;
+  private final ExpressionReader expressions;
+  private final Issues issues;
 
-  PackReader(ExpressionLanguage language, List<TextIssue> issues) {
-    this.language = language;
+  PackReader(ExpressionLanguage language, Issues issues) {
+    this.expressions = new ExpressionReader(language, issues);
     this.issues = issues;
   }
 
@@ -38,56 +40,74 @@ final class PackReader {
    * @param text whole file
    */
   Optional<RulePack> read(String file, String stem, String text) {
-    Optional<YamlNode> root;
-    try {
-      root = YamlReader.read(file, text);
-    } catch (YamlRefused e) {
-      issues.add(e.issue());
-      return Optional.empty();
+    int before = issues.count();
+    Place top = new Place(file, 1, 1);
+    Optional<YamlNode> root = YamlDocument.read(file, text, issues);
+    if (root.isEmpty() && issues.count() == before) {
+      issues.add(top, "the file holds no rule pack", "begin with \"pack: " + stem + "\"");
     }
-    if (root.isEmpty()) {
-      issues.add(new TextIssue(new Place(file, 1, 1), "the file is empty"));
-      return Optional.empty();
-    }
-    return Fields.asGroup(root.get(), "a rule pack", issues)
-        .flatMap(mapping -> read(mapping, stem, text));
+    Optional<RulePack> pack =
+        root.flatMap(
+                node ->
+                    Fields.of(
+                        new Value("", top, node),
+                        issues,
+                        "pack",
+                        "title",
+                        "asked_by",
+                        "asked_in_words",
+                        "deference",
+                        "rules"))
+            .flatMap(fields -> read(fields, stem, text));
+    return issues.count() > before ? Optional.empty() : pack;
   }
 
-  private Optional<RulePack> read(Mapping mapping, String stem, String text) {
-    int before = issues.size();
-    Fields fields = new Fields(mapping, "the rule pack", KEYS, issues);
-    Optional<Scalar> name = fields.text("pack");
-    if (name.isPresent() && !name.get().value().equals(stem)) {
-      fields.complain(
-          name.get(), "the pack of this file must be named '" + stem + "' like the file");
-    }
-    Optional<Scalar> title = fields.text("title");
-    Optional<Scalar> deference = fields.text("deference");
-    RuleReader reader =
-        new RuleReader(language, stem, deference.map(Scalar::value).orElse(""), issues);
+  private Optional<RulePack> read(Fields fields, String stem, String text) {
+    fields.need("pack", stem).ifPresent(value -> mustBeNamed(value, stem));
+    Optional<String> title = fields.need("title").flatMap(value -> Texts.word(value, issues));
+    Optional<String> deference =
+        fields.need("deference").flatMap(value -> Texts.word(value, issues));
     Optional<Rule.Condition> askedBy =
-        reader.condition(fields, "asked_by", "asked_in_words", Scope.GAS);
+        expressions.condition(fields, "asked_by", "asked_in_words", Scope.GAS);
+    RuleReader reader = new RuleReader(expressions, stem, deference.orElse(""), issues);
     List<Rule> rules = new ArrayList<>();
-    Map<String, Scalar> seen = new HashMap<>();
-    for (Mapping rule : fields.groups("rules", "rule")) {
-      refuseSecond(rule, seen);
-      reader.read(rule).ifPresent(rules::add);
+    Map<String, Place> seen = new HashMap<>();
+    for (Value item :
+        fields
+            .need("rules")
+            .map(list -> Lists.items(list, 1, MOST_RULES, issues))
+            .orElse(List.of())) {
+      refuseSecond(item, seen);
+      reader.read(item).ifPresent(rules::add);
     }
-    if (issues.size() > before) {
-      return Optional.empty();
-    }
-    return Optional.of(
-        new RulePack(stem, title.orElseThrow().value(), askedBy, rules, sha256(text)));
+    return title.map(words -> new RulePack(stem, words, askedBy, rules, sha256(text)));
   }
 
-  private void refuseSecond(Mapping rule, Map<String, Scalar> seen) {
-    if (rule.get("id").orElse(null) instanceof Scalar id) {
-      Scalar first = seen.putIfAbsent(id.value(), id);
+  private void mustBeNamed(Value value, String stem) {
+    Optional<String> name = Texts.word(value, issues);
+    if (name.filter(word -> !word.equals(stem)).isPresent()) {
+      issues.add(
+          value.place(),
+          "the pack has another name than its file",
+          "write \"pack: " + stem + "\" or name the file " + name.get() + ".yaml");
+    }
+  }
+
+  private void refuseSecond(Value rule, Map<String, Place> seen) {
+    if (!(rule.node() instanceof YamlNode.Table table)) {
+      return;
+    }
+    Optional<YamlNode> id = Optional.ofNullable(table.fields().get("id")).map(Field::value);
+    if (id.orElse(null) instanceof YamlNode.Text text) {
+      Place first = seen.putIfAbsent(text.value(), text.place());
       if (first != null) {
         issues.add(
-            new TextIssue(
-                id.place(),
-                "the id '" + id.value() + "' stands already in line " + first.place().line()));
+            text.place(),
+            "the id "
+                + Printable.quote(text.value())
+                + " stands here a second time, first at line "
+                + first.line(),
+            "every rule of a pack has its own id");
       }
     }
   }

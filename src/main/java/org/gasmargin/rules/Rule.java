@@ -12,8 +12,7 @@ import org.gasmargin.units.Dimension;
  * @param id pack and name, for example {@code general.max_pressure}
  * @param title one line
  * @param condition when it applies; empty if always
- * @param quantityName what is predicted, in words
- * @param quantity gives the predicted value
+ * @param predicted what is held against the limit
  * @param limit which of the user's limits it is held against
  * @param defaultLimit used where the user states none
  * @param direction on which side the value has to stay
@@ -23,15 +22,13 @@ import org.gasmargin.units.Dimension;
  * @param caution printed with each finding
  * @param lookup what to look up when the limit is missing, and where it usually stands
  * @param source of the rule
- * @param status of the source
  * @param examples held by {@link RulePack#runExamples}
  */
 record Rule(
     String id,
     String title,
     Optional<Condition> condition,
-    String quantityName,
-    Expression quantity,
+    Predicted predicted,
     Optional<LimitKind> limit,
     Optional<DefaultLimit> defaultLimit,
     Direction direction,
@@ -40,8 +37,7 @@ record Rule(
     Optional<String> insideIsNoPass,
     String caution,
     String lookup,
-    String source,
-    SourceStatus status,
+    SourceText source,
     List<RuleExample> examples) {
 
   Rule {
@@ -56,9 +52,17 @@ record Rule(
    */
   record Condition(Expression when, String words) {}
 
-  /** What the predicted value measures. */
-  Dimension dimension() {
-    return quantity.dimension().orElseThrow();
+  /**
+   * What is held against the limit.
+   *
+   * @param name in words
+   * @param value gives the number
+   */
+  record Predicted(String name, Expression value) {
+    /** What it measures. */
+    Dimension dimension() {
+      return value.dimension().orElseThrow();
+    }
   }
 
   /** The user's limits that the rule looks at. */
@@ -66,7 +70,7 @@ record Rule(
     Set<LimitKind> used = new TreeSet<>();
     limit.ifPresent(used::add);
     for (LimitKind kind : LimitKind.values()) {
-      if (quantity.names().contains(Vocabulary.limit(kind))
+      if (predicted.value().names().contains(Vocabulary.limit(kind))
           || defaultLimit
               .filter(d -> d.value().names().contains(Vocabulary.limit(kind)))
               .isPresent()) {

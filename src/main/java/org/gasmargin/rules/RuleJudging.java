@@ -19,7 +19,7 @@ final class RuleJudging {
   private RuleJudging(Rule rule, StepView view) {
     this.rule = rule;
     this.view = view;
-    difference = Arithmetic.differenceOf(rule.dimension());
+    difference = Arithmetic.differenceOf(rule.predicted().dimension());
   }
 
   /** What the rule says of the step. */
@@ -43,7 +43,7 @@ final class RuleJudging {
 
   private Finding finding() {
     view.distrust().ifPresent(unknown::add);
-    Operand quantity = rule.quantity().evaluate(view.operands());
+    Operand quantity = rule.predicted().value().evaluate(view.operands());
     Optional<LimitInForce> limit = limit();
     if (quantity instanceof Operand.Unknown reason && view.distrust().isEmpty()) {
       unknown.add(reason.reason());
@@ -123,8 +123,8 @@ final class RuleJudging {
         view.step(),
         view.vessel(),
         verdict,
-        rule.quantityName(),
-        rule.dimension(),
+        rule.predicted().name(),
+        rule.predicted().dimension(),
         predicted,
         limit.map(l -> OptionalDouble.of(l.value())).orElse(OptionalDouble.empty()),
         limit.map(LimitInForce::origin),
@@ -133,8 +133,8 @@ final class RuleJudging {
         path,
         reason,
         rule.caution(),
-        rule.source(),
-        rule.status().words());
+        rule.source().words(),
+        rule.source().status().words());
   }
 
   private String format(double margin) {

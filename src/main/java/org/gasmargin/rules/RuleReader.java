@@ -2,200 +2,190 @@ package org.gasmargin.rules;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
+import java.util.regex.Pattern;
 import org.gasmargin.units.Dimension;
-import org.gasmargin.yaml.TextIssue;
-import org.gasmargin.yaml.YamlNode.Mapping;
-import org.gasmargin.yaml.YamlNode.Scalar;
+import org.gasmargin.yaml.Fields;
+import org.gasmargin.yaml.Issues;
+import org.gasmargin.yaml.Texts;
+import org.gasmargin.yaml.Value;
 
 /** Reads one rule of a pack. */
 final class RuleReader {
-  private static final List<String> KEYS =
-      List.of(
-          "id",
-          "title",
-          "applies_when",
-          "applies_in_words",
-          "quantity",
-          "direction",
-          "limit",
-          "default_limit",
-          "required_margin",
-          "inside_is_no_pass",
-          "severity",
-          "caution",
-          "lookup",
-          "source",
-          "source_status",
-          "examples");
-  private static final List<String> QUANTITY_KEYS = List.of("name", "value");
-  private static final List<String> DEFAULT_KEYS = List.of("value", "source", "source_status");
+  private static final int LONGEST = 600;
+  private static final Pattern IDENTIFIER = Pattern.compile("[a-z][a-z0-9_]{0,39}");
 
-  private final ExpressionLanguage language;
+  private final ExpressionReader expressions;
   private final String pack;
   private final String deference;
-  private final List<TextIssue> issues;
+  private final Issues issues;
 
   /**
    * A reader for the rules of one pack.
    *
-   * @param language for expressions
+   * @param expressions for the expressions
    * @param pack name of the pack, in front of every identifier
    * @param deference sentence added to every caution
    * @param issues receives every error
    */
-  RuleReader(ExpressionLanguage language, String pack, String deference, List<TextIssue> issues) {
-    this.language = language;
+  RuleReader(ExpressionReader expressions, String pack, String deference, Issues issues) {
+    this.expressions = expressions;
     this.pack = pack;
     this.deference = deference;
     this.issues = issues;
   }
 
   /** The rule, or empty if anything in it is wrong. */
-  Optional<Rule> read(Mapping mapping) {
-    int before = issues.size();
-    Fields fields = new Fields(mapping, "the rule", KEYS, issues);
-    Optional<String> id = fields.text("id").flatMap(scalar -> identifier(fields, scalar));
-    String title = value(fields.text("title"));
+  Optional<Rule> read(Value value) {
+    int before = issues.count();
+    Optional<Fields> fields =
+        Fields.of(
+            value,
+            issues,
+            "id",
+            "title",
+            "applies_when",
+            "applies_in_words",
+            "quantity",
+            "direction",
+            "limit",
+            "default_limit",
+            "required_margin",
+            "inside_is_no_pass",
+            "severity",
+            "caution",
+            "lookup",
+            "source",
+            "source_status",
+            "examples");
+    Optional<Rule> rule = fields.flatMap(this::read);
+    return issues.count() > before ? Optional.empty() : rule;
+  }
+
+  private Optional<Rule> read(Fields fields) {
+    Optional<String> id = fields.need("id").flatMap(this::identifier);
+    Optional<String> title = text(fields, "title");
     Optional<Rule.Condition> condition =
-        condition(fields, "applies_when", "applies_in_words", Scope.STEP);
-    Optional<Mapping> quantityGroup = fields.group("quantity");
-    Optional<Fields> quantityFields =
-        quantityGroup.map(group -> new Fields(group, "the quantity", QUANTITY_KEYS, issues));
-    String quantityName = value(quantityFields.flatMap(q -> q.text("name")));
-    Optional<Scalar> quantityText = quantityFields.flatMap(q -> q.text("value"));
-    Optional<Expression> quantity = quantityText.flatMap(text -> number(text, Scope.STEP));
-    Optional<Direction> direction = fields.word("direction", Direction.values(), Direction::key);
-    Optional<LimitKind> limit =
-        fields
-            .optionalText("limit")
-            .flatMap(text -> fields.wordOf(text, "limit", LimitKind.values(), LimitKind::key));
-    Optional<DefaultLimit> defaultLimit = defaultLimit(fields, quantity);
+        expressions.condition(fields, "applies_when", "applies_in_words", Scope.STEP);
+    Optional<Rule.Predicted> predicted = fields.need("quantity").flatMap(this::predicted);
+    Optional<Dimension> dimension = predicted.map(Rule.Predicted::dimension);
+    Optional<LimitKind> limit = fields.find("limit").flatMap(v -> limit(v, dimension));
+    Optional<DefaultLimit> defaultLimit =
+        fields.find("default_limit").flatMap(v -> defaultLimit(v, dimension));
     if (!fields.has("limit") && !fields.has("default_limit")) {
-      fields.complain("the rule has neither 'limit' nor 'default_limit'");
+      issues.add(
+          fields.owner().place(),
+          "the rule has neither a limit nor a default_limit",
+          "write for example \"limit: max_pressure\"");
     }
-    limit.ifPresent(kind -> sameDimension(fields, "limit", quantity, kind.dimension()));
-    Optional<Expression> requiredMargin = requiredMargin(fields, quantity);
-    Optional<Severity> severity = fields.word("severity", Severity.values(), Severity::key);
-    Optional<String> insideIsNoPass = fields.optionalText("inside_is_no_pass").map(Scalar::value);
-    String caution = value(fields.text("caution"));
-    String lookup = value(fields.text("lookup"));
-    String source = value(fields.text("source"));
-    Optional<SourceStatus> status =
-        fields.word("source_status", SourceStatus.values(), SourceStatus::words);
+    Optional<Direction> direction = choice(fields, "direction", Direction.values(), Direction::key);
+    Optional<Expression> margin =
+        fields.need("required_margin").flatMap(v -> expressions.margin(v, dimension));
+    Optional<Severity> severity = choice(fields, "severity", Severity.values(), Severity::key);
+    Optional<String> noPass = fields.find("inside_is_no_pass").flatMap(this::sentence);
+    Optional<String> caution = text(fields, "caution");
+    Optional<String> lookup = text(fields, "lookup");
+    Optional<SourceText> source = source(fields);
     List<RuleExample> examples =
-        new ExampleReader(language, issues).read(fields, insideIsNoPass.isPresent());
-    if (issues.size() > before) {
+        fields
+            .need("examples", "[{name: ..., given: {...}, expect: OVER LIMIT}, ...]")
+            .map(v -> new ExampleReader(expressions, issues).read(v, noPass.isPresent()))
+            .orElse(List.of());
+    if (id.isEmpty()
+        || title.isEmpty()
+        || predicted.isEmpty()
+        || direction.isEmpty()
+        || margin.isEmpty()
+        || severity.isEmpty()
+        || caution.isEmpty()
+        || lookup.isEmpty()
+        || source.isEmpty()) {
       return Optional.empty();
     }
     return Optional.of(
         new Rule(
-            pack + "." + id.orElseThrow(),
-            title,
+            pack + "." + id.get(),
+            title.get(),
             condition,
-            quantityName,
-            quantity.orElseThrow(),
+            predicted.get(),
             limit,
             defaultLimit,
-            direction.orElseThrow(),
-            requiredMargin.orElseThrow(),
-            severity.orElseThrow(),
-            insideIsNoPass,
-            caution + " " + deference,
-            lookup,
-            source,
-            status.orElseThrow(),
+            direction.get(),
+            margin.get(),
+            severity.get(),
+            noPass,
+            caution.get() + " " + deference,
+            lookup.get(),
+            source.get(),
             examples));
   }
 
-  /** Reads a condition with its words; both keys stand or neither. */
-  Optional<Rule.Condition> condition(Fields fields, String whenKey, String wordsKey, Scope scope) {
-    Optional<Scalar> when = fields.optionalText(whenKey);
-    Optional<Scalar> words = fields.optionalText(wordsKey);
-    if (fields.has(whenKey) != fields.has(wordsKey)) {
-      fields.complain("'" + whenKey + "' and '" + wordsKey + "' stand together or not at all");
-    }
-    Optional<Expression> expression = when.flatMap(text -> language.compile(text, scope, issues));
-    if (expression.isPresent() && expression.get().dimension().isPresent()) {
-      fields.complain(
-          when.orElseThrow(),
-          "'"
-              + whenKey
-              + "' gives "
-              + expression.get().dimension().get().noun()
-              + "; a condition was expected, as in step_kind == 'fill'");
-      return Optional.empty();
-    }
-    return expression.flatMap(e -> words.map(w -> new Rule.Condition(e, w.value())));
+  private Optional<Rule.Predicted> predicted(Value value) {
+    return Fields.of(value, issues, "name", "value")
+        .flatMap(
+            fields -> {
+              Optional<String> name = text(fields, "name");
+              Optional<Expression> number =
+                  fields
+                      .need("value", "peak_pressure")
+                      .flatMap(v -> expressions.number(v, Scope.STEP));
+              return number.flatMap(n -> name.map(words -> new Rule.Predicted(words, n)));
+            });
   }
 
-  private Optional<DefaultLimit> defaultLimit(Fields fields, Optional<Expression> quantity) {
-    Optional<Mapping> group = fields.optionalGroup("default_limit");
-    if (group.isEmpty()) {
-      return Optional.empty();
-    }
-    Fields own = new Fields(group.get(), "the default limit", DEFAULT_KEYS, issues);
-    Optional<Expression> value = own.text("value").flatMap(text -> number(text, Scope.STEP));
-    String source = value(own.text("source"));
+  private Optional<LimitKind> limit(Value value, Optional<Dimension> predicted) {
+    Optional<LimitKind> kind =
+        Texts.choice(value, "limit", LimitKind.values(), LimitKind::key, issues);
+    kind.ifPresent(k -> expressions.mustMatch(value, predicted, k.dimension()));
+    return kind;
+  }
+
+  private Optional<DefaultLimit> defaultLimit(Value value, Optional<Dimension> predicted) {
+    return Fields.of(value, issues, "value", "source", "source_status")
+        .flatMap(
+            fields -> {
+              Optional<Value> figure = fields.need("value", "bar_per_min(41.4)");
+              Optional<Expression> number = figure.flatMap(v -> expressions.number(v, Scope.STEP));
+              number
+                  .flatMap(Expression::dimension)
+                  .ifPresent(d -> expressions.mustMatch(figure.orElseThrow(), predicted, d));
+              Optional<SourceText> source = source(fields);
+              return number.flatMap(n -> source.map(s -> new DefaultLimit(n, s)));
+            });
+  }
+
+  private Optional<SourceText> source(Fields fields) {
+    Optional<String> words = text(fields, "source");
     Optional<SourceStatus> status =
-        own.word("source_status", SourceStatus.values(), SourceStatus::words);
-    value
-        .flatMap(Expression::dimension)
-        .ifPresent(dimension -> sameDimension(own, "value", quantity, dimension));
-    return value.flatMap(v -> status.map(s -> new DefaultLimit(v, source, s)));
+        choice(fields, "source_status", SourceStatus.values(), SourceStatus::words);
+    return words.flatMap(w -> status.map(s -> new SourceText(w, s)));
   }
 
-  private Optional<Expression> requiredMargin(Fields fields, Optional<Expression> quantity) {
-    Optional<Scalar> text = fields.text("required_margin");
-    Optional<Expression> margin = text.flatMap(scalar -> number(scalar, Scope.CONSTANT));
-    if (margin.isEmpty()) {
-      return Optional.empty();
-    }
-    Optional<Dimension> expected =
-        quantity.flatMap(Expression::dimension).map(Arithmetic::differenceOf);
-    Dimension actual = margin.get().dimension().orElseThrow();
-    if (expected.isPresent() && !expected.get().equals(actual)) {
-      fields.complain(
-          text.orElseThrow(),
-          "the margin is " + actual.noun() + "; " + expected.get().noun() + " was expected");
-    }
-    if (!(margin.get().evaluate(Operands.NONE) instanceof Operand.Figure figure)
-        || figure.si() < 0) {
-      fields.complain(text.orElseThrow(), "the margin must be a finite number, zero or above");
-    }
-    return margin;
-  }
-
-  private Optional<Expression> number(Scalar text, Scope scope) {
-    Optional<Expression> expression = language.compile(text, scope, issues);
-    if (expression.isPresent() && expression.get().dimension().isEmpty()) {
+  private Optional<String> identifier(Value value) {
+    Optional<String> word = Texts.word(value, issues);
+    if (word.filter(id -> !IDENTIFIER.matcher(id).matches()).isPresent()) {
       issues.add(
-          new TextIssue(
-              text.place(),
-              "'" + text.value() + "' is a condition; a quantity was expected, as in K(5.0)"));
+          value.place(),
+          "an id is lower-case letters, digits and _, and begins with a letter",
+          "write for example \"id: max_pressure\"");
       return Optional.empty();
     }
-    return expression;
+    return word;
   }
 
-  private static void sameDimension(
-      Fields fields, String key, Optional<Expression> quantity, Dimension dimension) {
-    Optional<Dimension> predicted = quantity.flatMap(Expression::dimension);
-    if (predicted.isPresent() && !predicted.get().equals(dimension)) {
-      fields.complain(
-          fields.text(key).orElseThrow(),
-          "compares " + predicted.get().noun() + " with " + dimension.noun());
+  private Optional<String> text(Fields fields, String key) {
+    return fields.need(key).flatMap(this::sentence);
+  }
+
+  private Optional<String> sentence(Value value) {
+    Optional<String> text = Texts.sentence(value, LONGEST, issues);
+    if (text.filter(String::isEmpty).isPresent()) {
+      issues.add(value.place(), value.path() + " is empty");
     }
+    return text.filter(words -> !words.isEmpty());
   }
 
-  private static Optional<String> identifier(Fields fields, Scalar text) {
-    if (text.value().matches("[a-z][a-z0-9_]*")) {
-      return Optional.of(text.value());
-    }
-    fields.complain(text, "an id is lower-case letters, digits and _, beginning with a letter");
-    return Optional.empty();
-  }
-
-  private static String value(Optional<Scalar> text) {
-    return text.map(Scalar::value).orElse("");
+  private <T> Optional<T> choice(Fields fields, String key, T[] values, Function<T, String> word) {
+    return fields.need(key).flatMap(v -> Texts.choice(v, "word", values, word, issues));
   }
 }

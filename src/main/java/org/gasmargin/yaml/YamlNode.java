@@ -1,82 +1,75 @@
 package org.gasmargin.yaml;
 
 import java.util.List;
-import java.util.Optional;
+import java.util.Map;
 import org.gasmargin.units.Place;
 
-/** A node of a YAML file with the place where it stands. */
+/** A node of a YAML document with the place where it begins. */
 public sealed interface YamlNode {
-
   /** Where the node begins. */
   Place place();
 
-  /** What the node is, for messages: "a text", "a list", "a group of keys". */
-  String kind();
+  /** The word for messages, with its article. */
+  String noun();
 
   /**
-   * A scalar. Its value is text; nothing is guessed from its look.
+   * A single value.
    *
-   * @param place where it begins, at the quote if there is one
-   * @param value the text without quotes
-   * @param textColumn column of the first character of the value if the value stands in the file
-   *     letter by letter; 0 if quotes, escapes or line breaks make them differ
+   * @param quoted whether it stood in quotes, so that {@code "null"} is a text
+   * @param verbatim whether the value stands in the file letter by letter, without escapes and line
+   *     breaks
    */
-  record Scalar(Place place, String value, int textColumn) implements YamlNode {
+  record Text(Place place, String value, boolean quoted, boolean verbatim) implements YamlNode {
     @Override
-    public String kind() {
-      return "a text";
+    public String noun() {
+      return isMissing() ? "nothing" : Printable.quote(value);
+    }
+
+    /** Whether nothing was written, or YAML's word for nothing. */
+    public boolean isMissing() {
+      return !quoted && (value.isEmpty() || value.matches("~|null|Null|NULL"));
     }
 
     /**
-     * Where a character of the value stands in the file; the start of the scalar if that cannot be
-     * told.
+     * Where a letter of the value stands in the file; the start of the text if that cannot be told.
      *
      * @param offset counted from 0, in code points
      */
     public Place placeOf(int offset) {
-      return textColumn == 0 ? place : new Place(place.file(), place.line(), textColumn + offset);
-    }
-  }
-
-  /** A list. */
-  record Sequence(Place place, List<YamlNode> items) implements YamlNode {
-    /** Copies the list. */
-    public Sequence {
-      items = List.copyOf(items);
-    }
-
-    @Override
-    public String kind() {
-      return "a list";
-    }
-  }
-
-  /** Keys with values, in the order of the file; no key stands twice. */
-  record Mapping(Place place, List<Entry> entries) implements YamlNode {
-    /** Copies the list. */
-    public Mapping {
-      entries = List.copyOf(entries);
-    }
-
-    @Override
-    public String kind() {
-      return "a group of keys";
-    }
-
-    /** The value of a key. */
-    public Optional<YamlNode> get(String key) {
-      return entries.stream()
-          .filter(entry -> entry.key().value().equals(key))
-          .map(Entry::value)
-          .findFirst();
+      int first = place.column() + (quoted ? 1 : 0);
+      return verbatim ? new Place(place.file(), place.line(), first + offset) : place;
     }
   }
 
   /**
-   * A key with its value.
+   * Keys with values, in the order of the file.
    *
-   * @param key the key as written
-   * @param value its value
+   * @param fields by key
    */
-  record Entry(Scalar key, YamlNode value) {}
+  record Table(Place place, Map<String, Field> fields) implements YamlNode {
+    @Override
+    public String noun() {
+      return "a map of keys";
+    }
+  }
+
+  /**
+   * A list.
+   *
+   * @param items in order
+   */
+  record Series(Place place, List<YamlNode> items) implements YamlNode {
+    @Override
+    public String noun() {
+      return "a list";
+    }
+  }
+
+  /**
+   * A value under a key.
+   *
+   * @param key where the key stands
+   * @param value what it holds
+   */
+  record Field(Place key, YamlNode value) {}
 }

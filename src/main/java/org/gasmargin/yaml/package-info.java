@@ -1,4 +1,4 @@
-/** YAML text as a tree of nodes with places; hostile text is refused before a tree exists. */
+/** Text files of unknown origin: YAML as nodes with places, and what is wrong with them. */
 @NullMarked
 package org.gasmargin.yaml;
 

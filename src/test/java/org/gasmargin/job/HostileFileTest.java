@@ -12,6 +12,7 @@ import java.nio.file.Path;
 import java.time.Duration;
 import java.util.List;
 import java.util.Random;
+import org.gasmargin.yaml.Issue;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -20,7 +21,7 @@ class HostileFileTest {
   @Test
   void aFileOfFiveMegabytesIsNotReadToItsEnd(@TempDir Path folder) throws IOException {
     assertEquals(
-        ":1:1: the file is larger than 256 KiB, too large for a job",
+        ":1:1: the file is larger than 256 KiB, too large",
         refusal(folder, "a: b\n".repeat(1 << 20).getBytes(UTF_8)));
   }
 
@@ -35,7 +36,7 @@ class HostileFileTest {
   @Test
   void nullBytesAreNoYaml(@TempDir Path folder) throws IOException {
     assertEquals(
-        ":1:9: the character U+0000 cannot stand in a job file",
+        ":1:9: the character U+0000 cannot stand in such a file",
         refusal(folder, "job: {ti\0tle: a}".getBytes(UTF_8)));
   }
 
@@ -88,7 +89,7 @@ class HostileFileTest {
   @Test
   void aFolderAndAMissingFileAreSaidToBeSo(@TempDir Path folder) {
     assertEquals(
-        folder + ":1:1: this is a folder, a job file was expected",
+        folder + ":1:1: this is a folder, a file was expected",
         assertThrows(JobErrors.class, () -> Jobs.READER.read(folder)).getMessage());
     Path missing = folder.resolve("missing.yaml");
     assertEquals(

@@ -2,6 +2,7 @@ package org.gasmargin.job;
 
 import java.util.List;
 import java.util.regex.Pattern;
+import org.gasmargin.yaml.Issue;
 
 /**
  * Tells errors of structure, which a schema can see, from errors of value, which it cannot: names

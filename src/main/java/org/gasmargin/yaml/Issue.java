@@ -1,10 +1,10 @@
-package org.gasmargin.job;
+package org.gasmargin.yaml;
 
 import java.util.Optional;
 import org.gasmargin.units.Place;
 
 /**
- * One thing in a job file that its author can put right.
+ * One thing in a file that its author can put right.
  *
  * @param place where it stands
  * @param problem what was read and why that is wrong, one line

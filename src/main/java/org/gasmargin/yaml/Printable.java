@@ -1,4 +1,4 @@
-package org.gasmargin.job;
+package org.gasmargin.yaml;
 
 import java.util.Locale;
 import java.util.regex.Matcher;
@@ -6,9 +6,9 @@ import java.util.regex.Pattern;
 import org.gasmargin.units.Place;
 
 /** Text of unknown origin made harmless for a terminal and a page. */
-final class Printable {
+public final class Printable {
   /** Control characters, broken surrogates, line separators and marks that turn the direction. */
-  static final String HIDDEN =
+  public static final String HIDDEN =
       "[\\p{Cc}\\p{Cs}\\p{Zl}\\p{Zp}\\u202A-\\u202E\\u2066-\\u2069\\uFEFF]";
 
   private static final Pattern HIDDEN_CHARACTER = Pattern.compile(HIDDEN);
@@ -18,26 +18,28 @@ final class Printable {
 
   private Printable() {}
 
-  static String line(String text) {
+  /** The text on one line, without characters that cannot be seen. */
+  public static String line(String text) {
     String clean = HIDDEN_CHARACTER.matcher(text).replaceAll("?");
     return clean.length() <= LONGEST_LINE ? clean : clean.substring(0, LONGEST_LINE) + "...";
   }
 
   /** The text in quotes, shortened to what a message can bear. */
-  static String quote(String text) {
+  public static String quote(String text) {
     return "'"
         + (text.length() <= LONGEST_QUOTE ? text : text.substring(0, LONGEST_QUOTE) + "...")
         + "'";
   }
 
-  static boolean hasHidden(String text) {
+  /** Whether a text holds a character that cannot be seen. */
+  public static boolean hasHidden(String text) {
     return HIDDEN_CHARACTER.matcher(text).find();
   }
 
   /**
    * Whether a file holds a control character other than line ends and tabs; adds an issue if so.
    */
-  static boolean findsControl(String file, String text, Issues issues) {
+  public static boolean findsControl(String file, String text, Issues issues) {
     Matcher control = CONTROL.matcher(text);
     if (!control.find()) {
       return false;
@@ -49,7 +51,7 @@ final class Printable {
         new Place(file, line, before.codePointCount(start, before.length()) + 1),
         String.format(
             Locale.ROOT,
-            "the character U+%04X cannot stand in a job file",
+            "the character U+%04X cannot stand in such a file",
             control.group().codePointAt(0)));
     return true;
   }

@@ -1,4 +1,4 @@
-package org.gasmargin.job;
+package org.gasmargin.yaml;
 
 import java.util.ArrayList;
 import java.util.LinkedHashMap;

@@ -1,4 +1,4 @@
-package org.gasmargin.job;
+package org.gasmargin.yaml;
 
 import java.util.ArrayDeque;
 import java.util.Deque;
@@ -21,11 +21,14 @@ import org.snakeyaml.engine.v2.exceptions.YamlEngineException;
 /**
  * Reads YAML 1.2 of unknown origin into nodes with places. It works on the parser's events, so that
  * nothing recurses, and stops at the first anchor, alias, tag, second document or excess of depth
- * or size: a job file needs none of them, and each can hide what a reviewer would want to see.
+ * or size: no file here needs any of them, and each can hide what a reviewer would want to see.
  */
-final class YamlDocument {
-  static final int DEEPEST = 20;
-  static final int MOST_NODES = 20_000;
+public final class YamlDocument {
+  /** Levels of nesting that are read. */
+  public static final int DEEPEST = 20;
+
+  /** Values that are read. */
+  public static final int MOST_NODES = 20_000;
 
   private final String file;
   private final Issues issues;
@@ -40,12 +43,12 @@ final class YamlDocument {
   }
 
   /** The document, or empty after an issue was added. An empty file has no document. */
-  static Optional<YamlNode> read(String file, String text, Issues issues) {
+  public static Optional<YamlNode> read(String file, String text, Issues issues) {
     if (Printable.findsControl(file, text, issues)) {
       return Optional.empty();
     }
     YamlDocument document = new YamlDocument(file, issues);
-    LoadSettings settings = LoadSettings.builder().setLabel("job").setUseMarks(true).build();
+    LoadSettings settings = LoadSettings.builder().setLabel("text").setUseMarks(true).build();
     try {
       for (Event event : new Parse(settings).parseString(text)) {
         if (!document.take(event)) {
@@ -82,15 +85,14 @@ final class YamlDocument {
   private boolean take(Event event) {
     Place place = event.getStartMark().map(this::place).orElse(new Place(file, 1, 1));
     if (event instanceof DocumentStartEvent && ++documents > 1) {
-      return refuse(place, "a second document begins here", "a job file holds one job");
+      return refuse(place, "a second document begins here", "a file holds one document");
     }
     if (event instanceof NodeEvent node && !isPlain(node, place)) {
       return false;
     }
     if (event instanceof ScalarEvent scalar) {
-      add(
-          new YamlNode.Text(
-              place, scalar.getValue(), scalar.getScalarStyle() != ScalarStyle.PLAIN));
+      boolean quoted = scalar.getScalarStyle() != ScalarStyle.PLAIN;
+      add(new YamlNode.Text(place, scalar.getValue(), quoted, isVerbatim(scalar)));
     } else if (event instanceof CollectionStartEvent) {
       if (open.size() >= DEEPEST) {
         return refuse(place, "this is nested more than " + DEEPEST + " deep", "");
@@ -103,13 +105,24 @@ final class YamlDocument {
     return true;
   }
 
+  /** An escape or a line break makes a text longer in the file than its value and its quotes. */
+  private static boolean isVerbatim(ScalarEvent scalar) {
+    if (scalar.getStartMark().isEmpty() || scalar.getEndMark().isEmpty()) {
+      return false;
+    }
+    Mark start = scalar.getStartMark().get();
+    Mark end = scalar.getEndMark().get();
+    int quotes = scalar.isPlain() ? 0 : 2;
+    int length = scalar.getValue().codePointCount(0, scalar.getValue().length()) + quotes;
+    return start.getLine() == end.getLine() && end.getColumn() - start.getColumn() == length;
+  }
+
   private boolean isPlain(NodeEvent node, Place place) {
     if (++nodes > MOST_NODES) {
       return refuse(place, "the file holds more than " + MOST_NODES + " values", "");
     }
     if (node instanceof AliasEvent || node.getAnchor().isPresent()) {
-      return refuse(
-          place, "anchors and aliases are not used in job files", "write the value out again");
+      return refuse(place, "anchors and aliases are not used here", "write the value out again");
     }
     Optional<String> tag =
         node instanceof ScalarEvent scalar
@@ -119,7 +132,7 @@ final class YamlDocument {
       return refuse(
           place,
           "the tag " + Printable.quote(tag.get()) + " is not allowed",
-          "job files use no YAML tags");
+          "YAML tags are not used here");
     }
     return true;
   }

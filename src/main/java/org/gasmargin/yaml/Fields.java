@@ -1,4 +1,4 @@
-package org.gasmargin.job;
+package org.gasmargin.yaml;
 
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -8,8 +8,8 @@ import java.util.Optional;
 import java.util.Set;
 import org.gasmargin.units.NearestName;
 
-/** The fields of one map of a job, checked for keys that nobody reads. */
-final class Fields {
+/** The fields of one map, checked for keys that nobody reads. */
+public final class Fields {
   private final Value owner;
   private final Map<String, Value> values;
   private final Issues issues;
@@ -21,13 +21,13 @@ final class Fields {
   }
 
   /** The fields of a map that may hold these keys and no others; empty if it is not a map. */
-  static Optional<Fields> of(Value owner, Issues issues, String... keys) {
+  public static Optional<Fields> of(Value owner, Issues issues, String... keys) {
     Set<String> known = Set.of(keys);
     return named(owner, issues).map(fields -> fields.refuseOthersThan(known));
   }
 
   /** The fields of a map whose keys are names that the user chooses. */
-  static Optional<Fields> named(Value owner, Issues issues) {
+  public static Optional<Fields> named(Value owner, Issues issues) {
     if (!(owner.node() instanceof YamlNode.Table table)) {
       issues.add(
           owner.place(),
@@ -67,24 +67,28 @@ final class Fields {
     return this;
   }
 
-  Value owner() {
+  /** The map itself. */
+  public Value owner() {
     return owner;
   }
 
-  Map<String, Value> all() {
+  /** All fields by key, in the order of the file. */
+  public Map<String, Value> all() {
     return values;
   }
 
-  boolean has(String key) {
+  /** Whether a key stands here. */
+  public boolean has(String key) {
     return values.containsKey(key);
   }
 
-  Optional<Value> find(String key) {
+  /** The field of a key. */
+  public Optional<Value> find(String key) {
     return Optional.ofNullable(values.get(key));
   }
 
   /** The field, or empty after an issue was added. */
-  Optional<Value> need(String key) {
+  public Optional<Value> need(String key) {
     return need(key, "");
   }
 
@@ -93,7 +97,7 @@ final class Fields {
    *
    * @param example a value for the key, or an empty text
    */
-  Optional<Value> need(String key, String example) {
+  public Optional<Value> need(String key, String example) {
     if (!has(key)) {
       issues.add(
           owner.key(),
@@ -104,7 +108,7 @@ final class Fields {
   }
 
   /** Adds an issue if a key stands beside another with which it has no meaning. */
-  void refuse(String key, String beside) {
+  public void refuse(String key, String beside) {
     find(key)
         .ifPresent(
             value ->

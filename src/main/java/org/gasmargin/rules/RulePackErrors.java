@@ -2,21 +2,21 @@ package org.gasmargin.rules;
 
 import java.util.List;
 import java.util.stream.Collectors;
-import org.gasmargin.yaml.TextIssue;
+import org.gasmargin.yaml.Issue;
 
 /** Rule packs that cannot be used. Nothing is judged with a part of them. */
-public final class RulePackRefused extends RuntimeException {
+public final class RulePackErrors extends RuntimeException {
   private static final long serialVersionUID = 1L;
 
-  private final transient List<TextIssue> issues;
+  private final transient List<Issue> issues;
 
-  RulePackRefused(List<TextIssue> issues) {
-    super(issues.stream().map(TextIssue::toString).collect(Collectors.joining("\n")));
+  RulePackErrors(List<Issue> issues) {
+    super(issues.stream().map(Issue::toString).collect(Collectors.joining("\n")));
     this.issues = List.copyOf(issues);
   }
 
   /** Every error of every file, in the order of files and places. */
-  public List<TextIssue> issues() {
+  public List<Issue> issues() {
     return issues;
   }
 }

@@ -1,4 +1,4 @@
-package org.gasmargin.job;
+package org.gasmargin.yaml;
 
 import java.io.IOException;
 import java.io.InputStream;
@@ -12,17 +12,17 @@ import java.util.Optional;
 import org.gasmargin.units.Place;
 
 /** Takes the text out of a file that may be anything. */
-final class JobFile {
-  /** A job of a hundred steps with many words takes a tenth of this. */
-  static final int LARGEST = 256 * 1024;
+public final class TextFile {
+  /** Bytes of the largest file that is read; a job of a hundred steps takes a tenth of this. */
+  public static final int LARGEST = 256 * 1024;
 
-  private JobFile() {}
+  private TextFile() {}
 
   /** The text, or empty after an issue was added. No more than {@link #LARGEST} bytes are read. */
-  static Optional<String> text(Path file, Issues issues) {
+  public static Optional<String> text(Path file, Issues issues) {
     Place top = new Place(file.toString(), 1, 1);
     if (Files.isDirectory(file)) {
-      issues.add(top, "this is a folder, a job file was expected");
+      issues.add(top, "this is a folder, a file was expected");
       return Optional.empty();
     }
     try (InputStream stream = Files.newInputStream(file)) {
@@ -38,7 +38,7 @@ final class JobFile {
 
   private static Optional<String> text(byte[] bytes, Place top, Issues issues) {
     if (bytes.length > LARGEST) {
-      issues.add(top, "the file is larger than " + LARGEST / 1024 + " KiB, too large for a job");
+      issues.add(top, "the file is larger than " + LARGEST / 1024 + " KiB, too large");
       return Optional.empty();
     }
     try {

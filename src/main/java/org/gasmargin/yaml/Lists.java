@@ -1,17 +1,17 @@
-package org.gasmargin.job;
+package org.gasmargin.yaml;
 
 import java.util.ArrayList;
 import java.util.List;
 
 /** Reads lists. */
-final class Lists {
+public final class Lists {
   private Lists() {}
 
   /**
    * The items, numbered from 1 in their paths; none, after an issue, if it is not a list or has too
    * few or too many.
    */
-  static List<Value> items(Value list, int least, int most, Issues issues) {
+  public static List<Value> items(Value list, int least, int most, Issues issues) {
     if (!(list.node() instanceof YamlNode.Series series)) {
       issues.add(
           list.place(), "a list was expected for " + list.path() + ", not " + list.node().noun());
