@@ -1,10 +1,10 @@
 package org.gasmargin.gas.equation;
 
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.stream.DoubleStream;
-import java.util.stream.IntStream;
 
 /**
  * Terms n delta^d tau^t exp(-delta^l); l = 0 means no exponential factor. Terms that share d and l
@@ -30,9 +30,9 @@ public final class PowerExponentialTerms implements ResidualTerms {
   private final double[] t;
   private final double[] tt;
   private final int[] tauSlot;
+  private final int[] sumSlot;
 
   // one entry per group of equal (l, d)
-  private final int[] groupEnd;
   private final double[] groupD;
   private final int[] groupDeltaSlot;
   private final int[] groupExponential;
@@ -60,21 +60,17 @@ public final class PowerExponentialTerms implements ResidualTerms {
     exponentialL = ls;
     exponentialSlot = Arrays.stream(ls).mapToInt(deltaPowers::slot).toArray();
 
-    int[] starts =
-        IntStream.range(0, terms.size())
-            .filter(i -> i == 0 || !sameGroup(terms.get(i - 1), terms.get(i)))
-            .toArray();
-    groupEnd = new int[starts.length];
-    groupD = new double[starts.length];
-    groupDeltaSlot = new int[starts.length];
-    groupExponential = new int[starts.length];
-    for (int g = 0; g < starts.length; g++) {
-      Term first = terms.get(starts[g]);
-      groupEnd[g] = g + 1 < starts.length ? starts[g + 1] : terms.size();
-      groupD[g] = first.d();
-      groupDeltaSlot[g] = deltaPowers.slot(first.d());
-      groupExponential[g] = Arrays.binarySearch(ls, first.l());
+    List<Term> groups = new ArrayList<>();
+    sumSlot = new int[terms.size()];
+    for (int i = 0; i < terms.size(); i++) {
+      if (i == 0 || !sameGroup(terms.get(i - 1), terms.get(i))) {
+        groups.add(terms.get(i));
+      }
+      sumSlot[i] = 3 * (groups.size() - 1);
     }
+    groupD = groups.stream().mapToDouble(Term::d).toArray();
+    groupDeltaSlot = groups.stream().mapToInt(group -> deltaPowers.slot(group.d())).toArray();
+    groupExponential = groups.stream().mapToInt(g -> Arrays.binarySearch(ls, g.l())).toArray();
   }
 
   private static boolean sameGroup(Term a, Term b) {
@@ -92,27 +88,20 @@ public final class PowerExponentialTerms implements ResidualTerms {
     private final double[] exponential = new double[exponentialL.length];
 
     /** Per group: sum of n tau^t, the same times t, the same times t (t-1). */
-    private final double[] tauSums = new double[3 * groupEnd.length];
+    private final double[] tauSums = new double[3 * groupD.length];
 
     private double tauKept = Double.NaN;
     private double deltaKept = Double.NaN;
 
     private void moveTau(double tau) {
       tauPowers.fill(tau, tauValues);
-      int i = 0;
-      for (int g = 0; g < groupEnd.length; g++) {
-        double s = 0;
-        double st = 0;
-        double stt = 0;
-        for (; i < groupEnd[g]; i++) {
-          double c = n[i] * tauValues[tauSlot[i]];
-          s += c;
-          st += c * t[i];
-          stt += c * tt[i];
-        }
-        tauSums[3 * g] = s;
-        tauSums[3 * g + 1] = st;
-        tauSums[3 * g + 2] = stt;
+      Arrays.fill(tauSums, 0);
+      for (int i = 0; i < n.length; i++) {
+        double c = n[i] * tauValues[tauSlot[i]];
+        int slot = sumSlot[i];
+        tauSums[slot] += c;
+        tauSums[slot + 1] += c * t[i];
+        tauSums[slot + 2] += c * tt[i];
       }
       tauKept = tau;
     }
@@ -139,7 +128,7 @@ public final class PowerExponentialTerms implements ResidualTerms {
       double t1 = 0;
       double t2 = 0;
       double dt = 0;
-      for (int g = 0; g < groupEnd.length; g++) {
+      for (int g = 0; g < groupD.length; g++) {
         int e = groupExponential[g];
         double l = exponentialL[e];
         double lx = l == 0 ? 0 : l * deltaValues[exponentialSlot[e]];

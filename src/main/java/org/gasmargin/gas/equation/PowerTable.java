@@ -1,9 +1,10 @@
 package org.gasmargin.gas.equation;
 
-import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.Predicate;
 
 /**
  * A plan that raises one base to many fixed exponents. Integers and eighths are built by
@@ -11,78 +12,101 @@ import java.util.Map;
  * exponential. Immutable; the values live in an array of the caller.
  */
 final class PowerTable {
-  private static final int ONE = 0;
-  private static final int BASE = 1;
-  private static final int RECIPROCAL = 2;
-  private static final int SQUARE_ROOT = 3;
-  private static final int EXPONENTIAL = 4;
-  private static final int PRODUCT = 5;
+  private enum Operation {
+    ONE,
+    BASE,
+    RECIPROCAL,
+    SQUARE_ROOT,
+    EXPONENTIAL,
+    PRODUCT
+  }
 
-  private record Step(int operation, int left, int right, double exponent) {}
+  private record Step(Operation operation, double exponent, double left, double right) {
+    static Step leaf(Operation operation, double exponent) {
+      return new Step(operation, exponent, Double.NaN, Double.NaN);
+    }
+  }
 
-  private final int[] operations;
+  // leaves come first, products after them, each behind what it needs
+  private final Operation[] leaves;
+  private final double[] exponents;
+  private final int[] sources;
   private final int[] lefts;
   private final int[] rights;
-  private final double[] exponents;
   private final boolean needsLogarithm;
-  private final Map<Double, Integer> slots = new HashMap<>();
+  private final Map<Double, Integer> slots;
 
   PowerTable(double... wanted) {
-    List<Step> steps = new ArrayList<>();
+    Map<Double, Step> plan = new LinkedHashMap<>();
     for (double exponent : wanted) {
-      plan(exponent, steps);
+      plan(exponent, plan);
     }
-    operations = steps.stream().mapToInt(Step::operation).toArray();
-    lefts = steps.stream().mapToInt(Step::left).toArray();
-    rights = steps.stream().mapToInt(Step::right).toArray();
-    exponents = steps.stream().mapToDouble(Step::exponent).toArray();
-    needsLogarithm = steps.stream().anyMatch(step -> step.operation() == EXPONENTIAL);
+    List<Step> leafSteps = steps(plan, step -> step.operation() != Operation.PRODUCT);
+    List<Step> products = steps(plan, step -> step.operation() == Operation.PRODUCT);
+    slots = new HashMap<>();
+    leafSteps.forEach(step -> slots.put(step.exponent(), slots.size()));
+    products.forEach(step -> slots.put(step.exponent(), slots.size()));
+    leaves = leafSteps.stream().map(Step::operation).toArray(Operation[]::new);
+    exponents = leafSteps.stream().mapToDouble(Step::exponent).toArray();
+    sources =
+        leafSteps.stream()
+            .mapToInt(
+                step -> step.operation() == Operation.SQUARE_ROOT ? slot(2 * step.exponent()) : 0)
+            .toArray();
+    lefts = products.stream().mapToInt(step -> slot(step.left())).toArray();
+    rights = products.stream().mapToInt(step -> slot(step.right())).toArray();
+    needsLogarithm = leafSteps.stream().anyMatch(s -> s.operation() == Operation.EXPONENTIAL);
   }
 
-  private int plan(double exponent, List<Step> steps) {
-    Integer known = slots.get(exponent);
-    if (known != null) {
-      return known;
-    }
-    Step step = step(exponent, steps);
-    steps.add(step);
-    slots.put(exponent, steps.size() - 1);
-    return steps.size() - 1;
+  private static List<Step> steps(Map<Double, Step> plan, Predicate<Step> which) {
+    return plan.values().stream().filter(which).toList();
   }
 
-  private Step step(double exponent, List<Step> steps) {
-    double whole = Math.floor(exponent);
-    double fraction = exponent - whole;
+  /** Puts the exponent into the plan, behind all that it is built from. */
+  private static void plan(double exponent, Map<Double, Step> plan) {
+    if (plan.containsKey(exponent)) {
+      return;
+    }
+    Step step = step(exponent);
+    if (step.operation() == Operation.SQUARE_ROOT) {
+      plan(2 * exponent, plan);
+    } else if (step.operation() == Operation.PRODUCT) {
+      plan(step.left(), plan);
+      plan(step.right(), plan);
+    }
+    plan.put(exponent, step);
+  }
+
+  private static Step step(double exponent) {
     if (exponent == 0) {
-      return new Step(ONE, 0, 0, 0);
+      return Step.leaf(Operation.ONE, exponent);
     }
     if (exponent == 1) {
-      return new Step(BASE, 0, 0, 0);
+      return Step.leaf(Operation.BASE, exponent);
     }
     if (exponent == -1) {
-      return new Step(RECIPROCAL, 0, 0, 0);
+      return Step.leaf(Operation.RECIPROCAL, exponent);
     }
     if (exponent == 0.5 || exponent == 0.25 || exponent == 0.125) {
-      return new Step(SQUARE_ROOT, plan(2 * exponent, steps), 0, 0);
+      return Step.leaf(Operation.SQUARE_ROOT, exponent);
     }
     if (8 * exponent != Math.rint(8 * exponent)) {
-      return new Step(EXPONENTIAL, 0, 0, exponent);
+      return Step.leaf(Operation.EXPONENTIAL, exponent);
     }
+    double whole = Math.floor(exponent);
     double left;
-    if (fraction == 0) {
+    if (exponent == whole) {
       left = Math.rint(exponent / 2);
     } else if (whole != 0) {
       left = whole;
     } else {
-      left = fraction > 0.5 ? 0.5 : 0.25;
+      left = exponent > 0.5 ? 0.5 : 0.25;
     }
-    int leftSlot = plan(left, steps);
-    int rightSlot = plan(exponent - left, steps);
-    return new Step(PRODUCT, leftSlot, rightSlot, 0);
+    return new Step(Operation.PRODUCT, exponent, left, exponent - left);
   }
 
   int size() {
-    return operations.length;
+    return leaves.length + lefts.length;
   }
 
   /** Where the power with this exponent stands in the array that {@link #fill} writes. */
@@ -97,16 +121,19 @@ final class PowerTable {
   /** Writes all planned powers of {@code base} (above zero) into {@code values}. */
   void fill(double base, double[] values) {
     double logarithm = needsLogarithm ? Math.log(base) : 0;
-    for (int i = 0; i < operations.length; i++) {
+    for (int i = 0; i < leaves.length; i++) {
       values[i] =
-          switch (operations[i]) {
-            case PRODUCT -> values[lefts[i]] * values[rights[i]];
-            case EXPONENTIAL -> Math.exp(exponents[i] * logarithm);
-            case SQUARE_ROOT -> Math.sqrt(values[lefts[i]]);
-            case RECIPROCAL -> 1 / base;
+          switch (leaves[i]) {
+            case ONE -> 1;
             case BASE -> base;
-            default -> 1;
+            case RECIPROCAL -> 1 / base;
+            case SQUARE_ROOT -> Math.sqrt(values[sources[i]]);
+            default -> Math.exp(exponents[i] * logarithm);
           };
+    }
+    int product = leaves.length;
+    for (int i = 0; i < lefts.length; i++) {
+      values[product++] = values[lefts[i]] * values[rights[i]];
     }
   }
 }

@@ -37,9 +37,22 @@ public record FluidLimits(
     melting = List.copyOf(melting);
   }
 
+  /** Low end of the range for a search, K: a hair wider, so that a state on the limit is found. */
+  double coldest() {
+    return range.minTemperature() * (1 - ROUNDING);
+  }
+
+  /** High end of the range for a search, K. */
+  double hottest() {
+    return range.maxTemperature() * (1 + ROUNDING);
+  }
+
+  boolean hasTemperature(double temperature) {
+    return temperature >= coldest() && temperature <= hottest();
+  }
+
   void requireTemperature(double temperature) {
-    if (!(temperature >= range.minTemperature() * (1 - ROUNDING)
-        && temperature <= range.maxTemperature() * (1 + ROUNDING))) {
+    if (!hasTemperature(temperature)) {
       throw refusal(
           "%s at %.6g K is outside the range of its equation of state, %.6g K to %.6g K",
           name, temperature, range.minTemperature(), range.maxTemperature());
@@ -97,7 +110,7 @@ public record FluidLimits(
     for (MeltingLine line : melting) {
       if (line.isSolid(temperature, pressure)) {
         throw refusal(
-            "%s at %.6g K and %.6g bar(a) is solid: it melts below %.6g bar(a) at this temperature",
+            "%s at %.6g K and %.6g bar(a) is solid: at this temperature it is fluid up to %.6g bar(a)",
             name,
             temperature,
             pressure / PASCAL_PER_BAR,

@@ -6,6 +6,7 @@ import org.gasmargin.gas.equation.BracketedNewton;
 import org.gasmargin.gas.equation.EquationPoint;
 import org.gasmargin.gas.equation.HelmholtzEquation;
 import org.gasmargin.gas.phase.PhaseBoundary;
+import org.gasmargin.gas.phase.PhaseEnds;
 
 /**
  * States from pairs of properties other than temperature and density.
@@ -18,6 +19,9 @@ import org.gasmargin.gas.phase.PhaseBoundary;
 final class StateSearch {
   private static final int QUICK_STEPS = 15;
   private static final double LAST_STEP = 1e-9;
+
+  /** What a bracketed search may leave of its target, as a relative change of temperature. */
+  private static final double LEFT_OVER = 1e-8;
 
   /** A usual temperature to start from, K. */
   private static final double ROOM_TEMPERATURE = 300;
@@ -43,20 +47,17 @@ final class StateSearch {
   State atDensity(double density, FixedDensity.Property property, double target, double guess) {
     EquationPoint point = equation.newPoint();
     FixedDensity function = new FixedDensity(point, density, property, target);
-    double start =
-        guess >= limits.range().minTemperature() && guess <= limits.range().maxTemperature()
-            ? guess
-            : usualTemperature();
+    double start = limits.hasTemperature(guess) ? guess : usualTemperature();
     double quick = quickTemperature(function, start);
-    if (quick >= limits.range().minTemperature() && quick <= limits.range().maxTemperature()) {
+    if (limits.hasTemperature(quick)) {
       point.moveTo(quick, density);
       if (isStable(point)) {
         return limits.accept(point);
       }
     }
     double coldest = coldestStable(density);
-    double temperature = bracketed(function, coldest, limits.range().maxTemperature(), start);
-    return limits.accept(point.moveTo(temperature, density));
+    bracketed(function, coldest, limits.hottest(), start);
+    return limits.accept(point);
   }
 
   private double quickTemperature(FixedDensity function, double start) {
@@ -90,7 +91,7 @@ final class StateSearch {
 
   /** Lowest temperature below the closing of the gap from which on it holds, else the closing. */
   private double lowest(DoublePredicate holds) {
-    double low = limits.range().minTemperature();
+    double low = limits.coldest();
     double high = limits.phases().gapCloses();
     if (holds.test(low)) {
       return low;
@@ -106,26 +107,31 @@ final class StateSearch {
     return high;
   }
 
-  /** Root between two temperatures, or a refusal that says on which side it would lie. */
-  private double bracketed(
+  /** Moves to the root between two temperatures, or refuses and says on which side it would lie. */
+  private void bracketed(
       BracketedNewton.Rising function, double coldest, double hottest, double guess) {
     function.moveTo(coldest);
     if (function.excess() > 0) {
-      double minimum = limits.range().minTemperature();
-      if (coldest > minimum) {
+      if (coldest > limits.coldest()) {
         throw limits.insideGap(Math.min(coldest, Math.nextDown(limits.phases().gapCloses())));
       }
       throw FluidLimits.refusal(
           "%s would be colder than %.6g K, where the range of its equation of state begins",
-          limits.name(), minimum);
+          limits.name(), limits.range().minTemperature());
     }
     function.moveTo(hottest);
     if (function.excess() < 0) {
       throw FluidLimits.refusal(
           "%s would be hotter than %.6g K, where the range of its equation of state ends",
-          limits.name(), hottest);
+          limits.name(), limits.range().maxTemperature());
     }
-    return BracketedNewton.solve(function, coldest, hottest, guess);
+    double temperature = BracketedNewton.solve(function, coldest, hottest, guess);
+    function.moveTo(temperature);
+    if (!(Math.abs(function.excess()) <= LEFT_OVER * temperature * function.slope())) {
+      throw FluidLimits.refusal(
+          "%s: the search for a state ended at %.6g K without meeting its target",
+          limits.name(), temperature);
+    }
   }
 
   State atPressure(double pressure, FixedPressure.Property property, double target) {
@@ -134,8 +140,7 @@ final class StateSearch {
     if (quickPoint(function, point)) {
       return limits.accept(point);
     }
-    double temperature = slowTemperature(function, pressure);
-    densities.move(point, temperature, pressure);
+    slowSearch(function, pressure);
     return limits.accept(point);
   }
 
@@ -151,8 +156,7 @@ final class StateSearch {
         return false;
       }
       if (size < LAST_STEP) {
-        return point.temperature() >= limits.range().minTemperature()
-            && point.temperature() <= limits.range().maxTemperature()
+        return limits.hasTemperature(point.temperature())
             && point.density() <= limits.maxDensity()
             && isStable(point);
       }
@@ -160,22 +164,27 @@ final class StateSearch {
     return false;
   }
 
+  private static boolean isLiquid(PhaseEnds ends, double pressure) {
+    return pressure > ends.vapourPressure() && pressure >= ends.liquidPressure();
+  }
+
   /**
-   * Temperature on the liquid or the gas part of the isobar. Above the critical pressure the two
-   * parts meet where the gap closes.
+   * Searches the liquid and the gas part of the isobar. Above the critical pressure the two parts
+   * meet where the gap closes.
    */
-  private double slowTemperature(FixedPressure function, double pressure) {
+  private void slowSearch(FixedPressure function, double pressure) {
     PhaseBoundary phases = limits.phases();
-    double minimum = limits.range().minTemperature();
-    double liquidEnds = lowest(t -> !(pressure >= phases.endsAt(t).liquidPressure()));
+    double minimum = limits.coldest();
+    double liquidEnds = lowest(t -> !isLiquid(phases.endsAt(t), pressure));
     if (liquidEnds > minimum) {
       double lastLiquid = Math.nextDown(liquidEnds);
       function.moveTo(lastLiquid);
       if (function.excess() >= 0) {
-        return bracketed(function, minimum, lastLiquid, lastLiquid);
+        bracketed(function, minimum, lastLiquid, lastLiquid);
+        return;
       }
     }
     double gasBegins = lowest(t -> pressure <= phases.endsAt(t).vapourPressure());
-    return bracketed(function, gasBegins, limits.range().maxTemperature(), usualTemperature());
+    bracketed(function, gasBegins, limits.hottest(), usualTemperature());
   }
 }

@@ -19,7 +19,10 @@ class GasCatalogueTest {
 
   @Test
   void everyListedGasLoadsAndIsFoundByEachOfItsNames() {
-    assertEquals(7, catalogue.list().size());
+    List<String> ids = catalogue.list().stream().map(GasSummary::id).toList();
+    assertTrue(
+        ids.containsAll(
+            List.of("nitrogen", "oxygen", "argon", "air", "helium", "hydrogen", "methane")));
     for (GasSummary summary : catalogue.list()) {
       Gas gas = catalogue.find(summary.id()).orElseThrow();
       assertEquals(summary.id(), gas.id());
