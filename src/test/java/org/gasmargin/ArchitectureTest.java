@@ -59,7 +59,7 @@ class ArchitectureTest {
         .whereLayer("gas")
         .mayOnlyBeAccessedByLayers("cli", "worksheet", "job", "rules", "process", "flow", "vessel")
         .whereLayer("yaml")
-        .mayOnlyBeAccessedByLayers("job", "rules")
+        .mayOnlyBeAccessedByLayers("cli", "job", "rules")
         .check(CLASSES);
   }
 }

@@ -11,6 +11,9 @@ import org.gasmargin.units.Dimension;
  * unknown or missing operand, a missing limit, a balance that does not close.
  */
 final class RuleJudging {
+  /** Relative difference of two numbers that may be round-off of the same calculation. */
+  private static final double RESOLUTION = 1e-10;
+
   private final Rule rule;
   private final StepView view;
   private final Dimension difference;
@@ -70,7 +73,7 @@ final class RuleJudging {
   }
 
   private Finding judged(Operand.Figure predicted, LimitInForce limit, double required) {
-    double margin = rule.direction().margin(limit.value(), predicted.si());
+    double margin = resolved(rule.direction().margin(limit.value(), predicted.si()), limit);
     Verdict verdict;
     String reason;
     if (!(Double.isFinite(margin) && Double.isFinite(required) && required >= 0)) {
@@ -97,6 +100,11 @@ final class RuleJudging {
         OptionalDouble.of(margin),
         predicted.path(),
         reason + limit.notes());
+  }
+
+  /** A margin that is smaller than the arithmetic resolves is none: neither inside nor beyond. */
+  private static double resolved(double margin, LimitInForce limit) {
+    return Math.abs(margin) <= RESOLUTION * Math.abs(limit.value()) ? 0 : margin;
   }
 
   private Finding notAssessed(Operand quantity, Optional<LimitInForce> limit) {

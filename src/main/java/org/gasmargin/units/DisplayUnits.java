@@ -8,7 +8,8 @@ import java.util.Map;
 
 /**
  * The units in which results are shown: those that the user typed. Differences of pressure and
- * temperature follow the unit of the points unless they have one of their own.
+ * temperature, and rates of pressure, follow the unit of the points unless they have one of their
+ * own.
  *
  * @param units one unit for each dimension that is not shown in SI
  * @param atmosphere atmospheric pressure, Pa absolute, for gauge units
@@ -21,6 +22,7 @@ public record DisplayUnits(Map<Dimension, Unit> units, double atmosphere) {
     Map<Dimension, Unit> all = new EnumMap<>(Dimension.class);
     for (Unit unit : units.values()) {
       all.put(unit.difference().dimension(), unit.difference());
+      unit.perMinute().ifPresent(rate -> all.put(rate.dimension(), rate));
     }
     all.putAll(units);
     units = Map.copyOf(all);

@@ -185,6 +185,18 @@ public enum Unit {
     };
   }
 
+  /**
+   * The unit in which the rate of change of a pressure in this unit is told: its own per minute
+   * where there is one, else bar/min; empty if the unit measures no pressure.
+   */
+  public Optional<Unit> perMinute() {
+    if (dimension != Dimension.ABSOLUTE_PRESSURE) {
+      return Optional.empty();
+    }
+    return find(difference().symbol + "/min", Dimension.PRESSURE_RATE)
+        .or(() -> Optional.of(BAR_PER_MINUTE));
+  }
+
   /** The same unit counted from zero if it is a gauge unit, else the unit itself. */
   public Unit absolute() {
     return gauge ? valueOf(name().replaceFirst("_GAUGE$", "_ABSOLUTE")) : this;

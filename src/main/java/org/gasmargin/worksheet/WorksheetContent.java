@@ -20,7 +20,7 @@ import org.gasmargin.units.Entry;
  * @param judgement what the rules say
  * @param entries inputs as typed
  * @param units for display
- * @param inputsSha256 hash of the job file and of the rule packs used, lower-case hexadecimal
+ * @param inputsSha256 hash of the job file, lower-case hexadecimal
  * @param programVersion for every page
  */
 public record WorksheetContent(
