@@ -1,13 +1,16 @@
 package org.gasmargin.gas.catalogue;
 
-import java.util.Comparator;
+import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.ConcurrentMap;
 import java.util.stream.Stream;
 import org.gasmargin.gas.Gas;
+import org.gasmargin.units.NearestName;
 
 /**
  * The gases that come with the program. A gas is read from its data file when it is first asked for
@@ -33,22 +36,23 @@ public final class GasCatalogue {
         .map(summary -> loaded.computeIfAbsent(summary.id(), id -> GasReader.read(summary)));
   }
 
-  /** Ids and synonyms close to a name that was not found, the closest first, at most three. */
+  /** Names and synonyms close to a name that was not found, the closest first, at most three. */
   public List<String> suggestions(String miss) {
+    Map<String, String> known = new HashMap<>();
+    index.stream().flatMap(GasCatalogue::names).forEach(name -> known.put(normal(name), name));
     String wanted = normal(miss);
-    int reach = Math.max(2, wanted.length() / 3);
-    return index.stream()
-        .flatMap(GasCatalogue::names)
-        .filter(name -> name.length() > 2 && EditDistance.between(normal(name), wanted) <= reach)
-        .distinct()
-        .sorted(Comparator.comparingInt(name -> EditDistance.between(normal(name), wanted)))
-        .limit(MOST_SUGGESTIONS)
-        .toList();
+    List<String> suggestions = new ArrayList<>();
+    Optional<String> next = NearestName.of(wanted, known.keySet());
+    while (next.isPresent() && suggestions.size() < MOST_SUGGESTIONS) {
+      next.map(known::remove).ifPresent(suggestions::add);
+      next = NearestName.of(wanted, known.keySet());
+    }
+    return suggestions;
   }
 
   private static Stream<String> names(GasSummary summary) {
     return Stream.concat(
-        Stream.of(summary.id(), summary.name(), summary.formula()), summary.synonyms().stream());
+        Stream.of(summary.name(), summary.formula(), summary.id()), summary.synonyms().stream());
   }
 
   /** Case, blanks, hyphens and underscores make no difference. */

@@ -82,6 +82,13 @@ public record FluidLimits(
     }
   }
 
+  /** Whether the point is one stable phase, gas or liquid. */
+  boolean isStable(EquationPoint point) {
+    double temperature = point.temperature();
+    return temperature >= phases.gapCloses()
+        || phases.isStable(temperature, point.density(), point.pressure());
+  }
+
   /** The state at a point, if it keeps every limit. */
   State accept(EquationPoint point) {
     double temperature = point.temperature();
@@ -90,7 +97,7 @@ public record FluidLimits(
     requireDensity(density);
     State state = point.toState();
     double pressure = state.pressure();
-    if (temperature < phases.gapCloses() && !phases.isStable(temperature, density, pressure)) {
+    if (!isStable(point)) {
       throw insideGap(temperature);
     }
     requirePressure(pressure);

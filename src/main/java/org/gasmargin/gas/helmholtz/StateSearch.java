@@ -51,7 +51,7 @@ final class StateSearch {
     double quick = quickTemperature(function, start);
     if (limits.hasTemperature(quick)) {
       point.moveTo(quick, density);
-      if (isStable(point)) {
+      if (limits.isStable(point)) {
         return limits.accept(point);
       }
     }
@@ -78,15 +78,10 @@ final class StateSearch {
     return Double.NaN;
   }
 
-  private boolean isStable(EquationPoint point) {
-    return point.temperature() >= limits.phases().gapCloses()
-        || limits.phases().isStable(point.temperature(), point.density(), point.pressure());
-  }
-
   /** Lowest temperature at which a density is one stable phase. */
   private double coldestStable(double density) {
     EquationPoint point = equation.newPoint();
-    return lowest(temperature -> isStable(point.moveTo(temperature, density)));
+    return lowest(temperature -> limits.isStable(point.moveTo(temperature, density)));
   }
 
   /** Lowest temperature below the closing of the gap from which on it holds, else the closing. */
@@ -158,7 +153,7 @@ final class StateSearch {
       if (size < LAST_STEP) {
         return limits.hasTemperature(point.temperature())
             && point.density() <= limits.maxDensity()
-            && isStable(point);
+            && limits.isStable(point);
       }
     }
     return false;
