@@ -15,11 +15,9 @@ import org.gasmargin.vessel.WallConduction;
  */
 final class Balance {
   private final GasWallSystem system;
-  private final WallConduction wall;
 
-  Balance(GasWallSystem system, WallConduction wall) {
+  Balance(GasWallSystem system) {
     this.system = system;
-    this.wall = wall;
   }
 
   /** The residuals of a solution. */
@@ -28,6 +26,7 @@ final class Balance {
     double[] after = trajectory.endUnknowns();
     double[] flows = trajectory.flows();
     double gasRise = energy(after) - energy(before);
+    WallConduction wall = system.wall();
     double wallRise = 0;
     for (int i = 0; i < wall.cells(); i++) {
       int row = GasWallSystem.FIRST_CELL + i;
@@ -45,12 +44,12 @@ final class Balance {
   }
 
   private double massResidual(double[] before, double[] after, double[] flows) {
-    if (!(system.content() instanceof Content.Rigid)) {
+    if (!(system.side().content() instanceof Content.Rigid)) {
       return 0; // a trapped amount is a constant of the equations
     }
     double start = before[GasWallSystem.EXTENT];
     double end = after[GasWallSystem.EXTENT];
-    return (end - start - flows[GasWallSystem.FLOW_EXTENT]) / Math.max(start, end);
+    return Math.abs(end - start - flows[GasWallSystem.FLOW_EXTENT]) / Math.max(start, end);
   }
 
   private double energy(double[] z) {
@@ -63,7 +62,7 @@ final class Balance {
   }
 
   private double amount(double[] z) {
-    return system.content().amount(z[GasWallSystem.EXTENT]);
+    return system.side().content().amount(z[GasWallSystem.EXTENT]);
   }
 
   private static double largest(double... terms) {

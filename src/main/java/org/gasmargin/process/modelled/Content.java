@@ -12,9 +12,6 @@ sealed interface Content {
   /** Derivative of the molar density by the extent. */
   double densitySlope(double extent);
 
-  /** The extent at a molar density, mol/m3. */
-  double extent(double density);
-
   /** Amount of gas, mol. */
   double amount(double extent);
 
@@ -41,11 +38,6 @@ sealed interface Content {
     @Override
     public double densitySlope(double extent) {
       return 1 / vesselVolume;
-    }
-
-    @Override
-    public double extent(double density) {
-      return density * vesselVolume;
     }
 
     @Override
@@ -86,11 +78,6 @@ sealed interface Content {
     @Override
     public double densitySlope(double extent) {
       return -trapped / (extent * extent);
-    }
-
-    @Override
-    public double extent(double density) {
-      return trapped / density;
     }
 
     @Override

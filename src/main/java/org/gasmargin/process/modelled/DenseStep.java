@@ -24,21 +24,33 @@ record DenseStep(
   double[] at(double time) {
     double length = end - start;
     double share = (time - start) / length;
-    double rest = 1 - share;
     double[] z = new double[startUnknowns.length];
     for (int i = 0; i < z.length; i++) {
-      double straight = startUnknowns[i] * rest + endUnknowns[i] * share;
-      double rise = endUnknowns[i] - startUnknowns[i];
       boolean bound = startSlopes[i] == 0 && endSlopes[i] == 0;
-      double bend =
+      z[i] =
           bound
-              ? 0
-              : share
-                  * rest
-                  * (rest * (length * startSlopes[i] - rise)
-                      - share * (length * endSlopes[i] - rise));
-      z[i] = straight + bend;
+              ? startUnknowns[i] * (1 - share) + endUnknowns[i] * share
+              : cubic(
+                  length, share, startUnknowns[i], endUnknowns[i], startSlopes[i], endSlopes[i]);
     }
     return z;
+  }
+
+  /**
+   * The cubic of Hermite.
+   *
+   * @param length of the step, s
+   * @param share of the step that has passed
+   * @param from value at the start
+   * @param to value at the end
+   * @param startSlope slope at the start, per s
+   * @param endSlope slope at the end, per s
+   */
+  static double cubic(
+      double length, double share, double from, double to, double startSlope, double endSlope) {
+    double rest = 1 - share;
+    double rise = to - from;
+    double bend = rest * (length * startSlope - rise) - share * (length * endSlope - rise);
+    return from * rest + to * share + share * rest * bend;
   }
 }

@@ -13,7 +13,7 @@ import org.gasmargin.gas.OutsideValidity;
 final class ImplicitIntegrator {
   private static final int MAX_STEPS = 20_000;
   private static final double SHORTEST = 1e-13;
-  private static final double LONGEST = 1.0 / 24;
+  private static final double LONGEST = 1.0 / 48;
 
   private final double tolerance;
 
@@ -90,7 +90,7 @@ final class ImplicitIntegrator {
       this.stepper = new ImplicitStep(system);
       this.flows = new double[system.flowCount()];
       this.z = start.clone();
-      system.makeConsistent(0, z);
+      system.makeConsistent(z);
       this.rates = ratesAt(0, z);
       this.slopes = slopesAt(z, rates);
       system.check(0, z, rates);

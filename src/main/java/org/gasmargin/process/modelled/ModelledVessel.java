@@ -31,8 +31,7 @@ public final class ModelledVessel {
   private final ModelInputs inputs;
   private final StepPlanner planner;
   private final double tolerance;
-  private final Optional<WallConduction> conduction;
-  private final Optional<OutsideExchange> outside;
+  private final Optional<WallSide> wallSide;
 
   /**
    * A vessel.
@@ -55,19 +54,15 @@ public final class ModelledVessel {
     double atmosphere =
         inputs.value(UncertainInput.ATMOSPHERIC_PRESSURE, site.atmosphericPressure());
     this.planner = new StepPlanner(vessel.gas(), inputs, atmosphere);
-    this.conduction =
-        vessel.wall().map(wall -> new WallConduction(wall, thicknesses(wall), wallRefinement));
-    this.outside =
-        vessel
-            .wall()
-            .map(
-                wall ->
-                    new OutsideExchange(
-                        wall,
-                        conduction.orElseThrow().thickness(),
-                        ambient,
-                        atmosphere,
-                        inputs.position(UncertainInput.FILM_OUTSIDE)));
+    this.wallSide = vessel.wall().map(wall -> wallSide(wall, ambient, atmosphere, wallRefinement));
+  }
+
+  private WallSide wallSide(Wall wall, double ambient, double atmosphere, int refinement) {
+    WallConduction conduction = new WallConduction(wall, thicknesses(wall), refinement);
+    double position = inputs.position(UncertainInput.FILM_OUTSIDE);
+    return new WallSide(
+        conduction,
+        new OutsideExchange(wall, conduction.thickness(), ambient, atmosphere, position));
   }
 
   private double[] thicknesses(Wall wall) {
@@ -93,7 +88,7 @@ public final class ModelledVessel {
         volume,
         density * volume,
         temperature,
-        Collections.nCopies(conduction.map(WallConduction::cells).orElse(0), wall));
+        Collections.nCopies(wallSide.map(side -> side.wall().cells()).orElse(0), wall));
   }
 
   /**
@@ -104,18 +99,18 @@ public final class ModelledVessel {
    * @return the path, or why there is none; never throws {@link OutsideValidity}
    */
   public ModelledStep run(Step step, VesselCondition start) {
-    if (conduction.isEmpty()) {
+    if (wallSide.isEmpty()) {
       return ModelledStep.without(
           new PathOutcome.Absent("no wall was given, so heat exchange cannot be modelled"));
     }
     try {
-      return run(planner.plan(step, start), start, conduction.get());
+      return run(planner.plan(step, start), start, wallSide.get());
     } catch (OutsideValidity refused) {
       return ModelledStep.without(new PathOutcome.Failed(String.valueOf(refused.getMessage())));
     }
   }
 
-  private ModelledStep run(StepPlan plan, VesselCondition start, WallConduction wall) {
+  private ModelledStep run(StepPlan plan, VesselCondition start, WallSide wall) {
     if (plan instanceof StepPlan.None none) {
       return ModelledStep.without(new PathOutcome.Absent(none.reason()));
     }
@@ -135,7 +130,7 @@ public final class ModelledVessel {
         new ImplicitIntegrator(tolerance)
             .integrate(system, z, integration.duration(), watches.list());
     watches.check(trajectory);
-    PathRecorder recorder = new PathRecorder(vessel.gas(), system, wall, integration.opening());
+    PathRecorder recorder = new PathRecorder(system);
     recorder.record(trajectory, watches.reached(trajectory));
     List<String> notes =
         film instanceof JetAndNaturalConvection correlation
@@ -148,23 +143,22 @@ public final class ModelledVessel {
     return new ModelledStep(
         new PathOutcome.Computed(recorder.path()),
         recorder.end(),
-        Optional.of(new Balance(system, wall).closure(trajectory)),
+        Optional.of(new Balance(system).closure(trajectory)),
         watches.events(trajectory),
         notes);
   }
 
   /** A step that is over before it starts: one point and the same condition. */
-  private ModelledStep standstill(VesselCondition start, WallConduction wall, String note) {
-    StepPlan.Integration closed =
-        StepPlanner.rigid(start, new Carried.Own(), new Opening.Constant(0), 0, StepPlan.NO_GUARD);
+  private ModelledStep standstill(VesselCondition start, WallSide wall, String note) {
+    StepPlan.Integration closed = StepPlanner.closed(start, 0);
     GasWallSystem system = system(closed, film(OptionalDouble.empty()), wall);
     double[] z =
         system.unknowns(
             start.amount(),
             start.temperature(),
             start.wall().stream().mapToDouble(Double::doubleValue).toArray());
-    system.makeConsistent(0, z);
-    PathRecorder recorder = new PathRecorder(vessel.gas(), system, wall, closed.opening());
+    system.makeConsistent(z);
+    PathRecorder recorder = new PathRecorder(system);
     recorder.recordInstant(z);
     return new ModelledStep(
         new PathOutcome.Computed(recorder.path()),
@@ -174,15 +168,11 @@ public final class ModelledVessel {
         List.of(note));
   }
 
-  private GasWallSystem system(StepPlan.Integration plan, FilmLaw film, WallConduction wall) {
+  private GasWallSystem system(StepPlan.Integration plan, FilmLaw film, WallSide wall) {
     return new GasWallSystem(
-        vessel.gas(),
-        plan.content(),
-        plan.carried(),
-        plan.opening(),
+        new GasSide(vessel.gas(), plan.content(), plan.carried(), plan.opening()),
         film,
         wall,
-        outside.orElseThrow(),
         plan.guard());
   }
 

@@ -36,14 +36,24 @@ sealed interface Opening {
   /**
    * A rate that the state of the gas sets.
    *
-   * @param law mol/s, positive into the vessel
+   * @param law the rate of a state
    */
   record ByState(Law law) implements Opening {}
 
   /** Rate as a function of the state of the gas. */
   @FunctionalInterface
   interface Law {
-    /** Rate, mol/s, positive into the vessel. */
-    double rate(State gas);
+    /** The rate and its slopes. */
+    Rate rate(State gas);
   }
+
+  /**
+   * A rate with its slopes, which may be approximate: only the speed of the iteration depends on
+   * them.
+   *
+   * @param value mol/s, positive into the vessel
+   * @param byDensity derivative by the molar density at constant temperature
+   * @param byTemperature derivative by the temperature at constant density
+   */
+  record Rate(double value, double byDensity, double byTemperature) {}
 }

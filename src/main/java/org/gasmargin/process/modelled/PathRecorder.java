@@ -5,11 +5,9 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeSet;
-import org.gasmargin.gas.Gas;
 import org.gasmargin.gas.State;
 import org.gasmargin.process.Path;
 import org.gasmargin.process.PathPoint;
-import org.gasmargin.vessel.WallConduction;
 
 /**
  * Reads a path off a solution: {@value #INTERVALS} equal intervals and the instants of events. The
@@ -19,10 +17,7 @@ final class PathRecorder {
   /** Number of equal intervals; a multiple of twelve. */
   static final int INTERVALS = 240;
 
-  private final Gas gas;
   private final GasWallSystem system;
-  private final WallConduction wall;
-  private final Opening opening;
   private final List<Sample> samples = new ArrayList<>();
   private final List<Sample> stepEnds = new ArrayList<>();
 
@@ -38,19 +33,9 @@ final class PathRecorder {
   @SuppressWarnings("ArrayRecordComponent") // never compared, never handed out of the package
   record Sample(double time, double[] z, State state, double pressure, double rate) {}
 
-  /**
-   * A recorder.
-   *
-   * @param gas in the vessel
-   * @param system equations that were solved
-   * @param wall of the vessel
-   * @param opening what set the flow
-   */
-  PathRecorder(Gas gas, GasWallSystem system, WallConduction wall, Opening opening) {
-    this.gas = gas;
+  /** A recorder of solutions of a system. */
+  PathRecorder(GasWallSystem system) {
     this.system = system;
-    this.wall = wall;
-    this.opening = opening;
   }
 
   /**
@@ -73,14 +58,14 @@ final class PathRecorder {
     DenseStep first = trajectory.steps().get(0);
     samples.add(sample(0, first.startUnknowns()));
     times.remove(0.0);
+    DenseReading reading = new DenseReading(system);
     int index = 0;
     for (double time : times) {
       while (trajectory.steps().get(index).end() < time) {
         index++;
       }
       DenseStep step = trajectory.steps().get(index);
-      double[] z = time == step.end() ? step.endUnknowns() : consistent(time, step.at(time));
-      samples.add(sample(time, z));
+      samples.add(sample(time, reading.at(step, time)));
     }
     Sample last = stepEnds.remove(stepEnds.size() - 1);
     double lastPressure = endPressure.orElse(last.pressure());
@@ -135,20 +120,21 @@ final class PathRecorder {
 
   private PathPoint point(Sample sample) {
     double[] z = sample.z();
-    boolean rigid = system.content() instanceof Content.Rigid;
+    double molarMass = system.side().gas().molarMass();
+    boolean rigid = system.side().content() instanceof Content.Rigid;
     return new PathPoint(
         sample.time(),
         sample.pressure(),
         z[GasWallSystem.TEMPERATURE],
-        system.content().amount(z[GasWallSystem.EXTENT]) * gas.molarMass(),
-        rigid ? sample.rate() * gas.molarMass() : 0,
+        system.side().content().amount(z[GasWallSystem.EXTENT]) * molarMass,
+        rigid ? sample.rate() * molarMass : 0,
         OptionalDouble.of(z[GasWallSystem.INNER_SURFACE]),
-        OptionalDouble.of(wall.meanTemperature(system.cells(z))));
+        OptionalDouble.of(system.wall().meanTemperature(system.cells(z))));
   }
 
   /** What the vessel holds at the end; empty after the compression of trapped gas. */
   Optional<VesselCondition> end() {
-    if (!(system.content() instanceof Content.Rigid rigid)) {
+    if (!(system.side().content() instanceof Content.Rigid rigid)) {
       return Optional.empty();
     }
     double[] z = last().z();
@@ -161,16 +147,14 @@ final class PathRecorder {
             rigid.vesselVolume(), z[GasWallSystem.EXTENT], z[GasWallSystem.TEMPERATURE], cells));
   }
 
-  private double[] consistent(double time, double[] z) {
-    system.makeConsistent(time, z);
-    return z;
-  }
-
   private Sample sample(double time, double[] z) {
     State state = system.gas(z);
     double[] rates = new double[z.length];
     system.rates(time, z, rates);
-    double pressure = opening instanceof Opening.Ramp ramp ? ramp.pressure(time) : state.pressure();
+    double pressure =
+        system.side().opening() instanceof Opening.Ramp ramp
+            ? ramp.pressure(time)
+            : state.pressure();
     return new Sample(time, z, state, pressure, rates[GasWallSystem.EXTENT]);
   }
 }

@@ -32,8 +32,8 @@ interface StageSystem {
   /** Rates dy/dt at unknowns that satisfy the algebraic equations. */
   void rates(double time, double[] z, double[] rates);
 
-  /** Changes the unknowns that are set by algebraic equations so that they satisfy these. */
-  void makeConsistent(double time, double[] z);
+  /** Changes the unknowns that hold nothing so that they satisfy their algebraic equations. */
+  void makeConsistent(double[] z);
 
   /** Turns rates dy/dt into dz/dt; zero for an unknown that is set by an algebraic equation. */
   void slopes(double[] z, double[] rates, double[] slopes);

@@ -17,9 +17,6 @@ final class StepPlanner {
    */
   private static final double BACKFLOW = 1e-9;
 
-  /** Overpressure, relative to the atmosphere, below which orifice flow falls off linearly. */
-  private static final double NEARLY_EMPTY = 1e-6;
-
   private final Gas gas;
   private final ModelInputs inputs;
   private final double atmosphere;
@@ -54,10 +51,19 @@ final class StepPlanner {
       return compress(compress, start, state);
     }
     double duration = ((Step.Hold) step).duration();
-    return duration > 0
-        ? rigid(start, new Carried.Own(), new Opening.Constant(0), duration, StepPlan.NO_GUARD)
-        : new StepPlan.Over("the hold takes no time");
+    return duration > 0 ? closed(start, duration) : new StepPlan.Over("the hold takes no time");
   }
+
+  /**
+   * What flows through the wall of the vessel.
+   *
+   * @param direction 1 in, -1 out
+   * @param carried energy that it brings or takes
+   * @param guard states that end it
+   * @param jetBore bore of the jet, m, if gas flows in and the bore is known
+   */
+  private record Stream(
+      int direction, Carried carried, GasWallSystem.Guard guard, OptionalDouble jetBore) {}
 
   private StepPlan fill(Step.Fill fill, VesselCondition start, State state) {
     double pressure = inputs.value(UncertainInput.SUPPLY_PRESSURE, fill.supply().pressure());
@@ -78,17 +84,13 @@ final class StepPlanner {
                     pressure / 1e5));
           }
         };
-    StepPlan plan;
+    Stream stream = new Stream(1, carried, guard, fill.inletDiameter());
     if (fill.drive() instanceof Drive.PressureRamp ramp) {
-      plan = ramp(ramp, start, state, carried, guard, 1);
-    } else if (fill.drive() instanceof Drive.MassFlow flow) {
-      plan = constantFlow(flow, start, carried, guard, 1);
-    } else {
-      return new StepPlan.None("a fill through an orifice has no modelled path");
+      return ramp(ramp, start, state, stream);
     }
-    return plan instanceof StepPlan.Integration integration
-        ? withJet(integration, fill.inletDiameter())
-        : plan;
+    return fill.drive() instanceof Drive.MassFlow flow
+        ? constantFlow(flow, start, stream)
+        : new StepPlan.None("a fill through an orifice has no modelled path");
   }
 
   private StepPlan vent(Step.Vent vent, VesselCondition start, State state) {
@@ -97,7 +99,7 @@ final class StepPlanner {
     }
     GasWallSystem.Guard guard =
         (time, inside, rate) -> {
-          if (inside.pressure() < atmosphere * (1 - NEARLY_EMPTY)) {
+          if (inside.pressure() < atmosphere * (1 - OrificeVent.NEARLY_EMPTY)) {
             throw new OutsideValidity(
                 String.format(
                     Locale.ROOT,
@@ -107,55 +109,54 @@ final class StepPlanner {
                     atmosphere / 1e5));
           }
         };
-    Carried carried = new Carried.Own();
+    Stream stream = new Stream(-1, new Carried.Own(), guard, OptionalDouble.empty());
     if (vent.drive() instanceof Drive.PressureRamp ramp) {
-      return ramp(ramp, start, state, carried, guard, -1);
+      return ramp(ramp, start, state, stream);
     }
-    if (vent.drive() instanceof Drive.MassFlow flow) {
-      return constantFlow(flow, start, carried, guard, -1);
-    }
-    return orifice((Drive.Orifice) vent.drive(), start, state, guard);
+    return vent.drive() instanceof Drive.MassFlow flow
+        ? constantFlow(flow, start, stream)
+        : orifice((Drive.Orifice) vent.drive(), start, state, stream);
   }
 
   private StepPlan ramp(
-      Drive.PressureRamp ramp,
-      VesselCondition start,
-      State state,
-      Carried carried,
-      GasWallSystem.Guard guard,
-      int direction) {
+      Drive.PressureRamp ramp, VesselCondition start, State state, Stream stream) {
     double until = inputs.value(UncertainInput.UNTIL, ramp.until());
-    if ((until - state.pressure()) * direction <= 0) {
+    if ((until - state.pressure()) * stream.direction() <= 0) {
       return over(until, state);
     }
     if (!(ramp.within() > 0)) {
       return suddenly();
     }
-    double idle = BACKFLOW * start.amount() / ramp.within();
-    GasWallSystem.Guard forward =
-        (time, inside, rate) -> {
-          guard.check(time, inside, rate);
-          if (rate * direction < -idle) {
-            throw new OutsideValidity(
-                String.format(
-                    Locale.ROOT,
-                    "after %.4g s heat exchange alone moves the pressure faster than the ramp: gas"
-                        + " would have to flow backwards",
-                    time));
-          }
-        };
+    Stream forward =
+        oneWay(
+            stream,
+            BACKFLOW * start.amount() / ramp.within(),
+            "heat exchange alone moves the pressure faster than the ramp: gas would have to flow"
+                + " backwards");
     Opening opening = new Opening.Ramp(state.pressure(), until, ramp.within());
-    return rigid(start, carried, opening, ramp.within(), forward);
+    return rigid(start, forward, opening, ramp.within());
   }
 
-  private StepPlan constantFlow(
-      Drive.MassFlow flow,
-      VesselCondition start,
-      Carried carried,
-      GasWallSystem.Guard guard,
-      int direction) {
+  /**
+   * The same stream, refused where it turns round.
+   *
+   * @param idle rate that counts as none
+   * @param reason in words
+   */
+  private static Stream oneWay(Stream stream, double idle, String reason) {
+    GasWallSystem.Guard guard =
+        (time, inside, rate) -> {
+          stream.guard().check(time, inside, rate);
+          if (rate * stream.direction() < -idle) {
+            throw new OutsideValidity(String.format(Locale.ROOT, "after %.4g s ", time) + reason);
+          }
+        };
+    return new Stream(stream.direction(), stream.carried(), guard, stream.jetBore());
+  }
+
+  private StepPlan constantFlow(Drive.MassFlow flow, VesselCondition start, Stream stream) {
     double massFlow = inputs.value(UncertainInput.MASS_FLOW, flow.massFlow());
-    double rate = direction * massFlow / gas.molarMass();
+    double rate = stream.direction() * massFlow / gas.molarMass();
     if (!(flow.duration() > 0)) {
       return new StepPlan.Over("the flow takes no time");
     }
@@ -168,11 +169,10 @@ final class StepPlanner {
               flow.duration(),
               start.amount() * gas.molarMass()));
     }
-    return rigid(start, carried, new Opening.Constant(rate), flow.duration(), guard);
+    return rigid(start, stream, new Opening.Constant(rate), flow.duration());
   }
 
-  private StepPlan orifice(
-      Drive.Orifice drive, VesselCondition start, State state, GasWallSystem.Guard guard) {
+  private StepPlan orifice(Drive.Orifice drive, VesselCondition start, State state, Stream stream) {
     Orifice hole =
         new Orifice(
             inputs.value(UncertainInput.ORIFICE_DIAMETER, drive.diameter()),
@@ -196,31 +196,27 @@ final class StepPlanner {
                   + " bar(a)",
               atmosphere / 1e5));
     }
-    Opening.Law law = inside -> -rate(hole, inside);
+    OrificeVent law = new OrificeVent(gas, hole, atmosphere);
     double duration =
-        timed ? drive.duration().getAsDouble() : 1000 * start.amount() / Math.abs(law.rate(state));
+        timed
+            ? drive.duration().getAsDouble()
+            : 1000 * start.amount() / Math.abs(law.rate(state).value());
+    Stream outwards =
+        oneWay(
+            stream,
+            BACKFLOW * start.amount() / duration,
+            "the gas cools at the pressure of the atmosphere: air would flow in");
     return new StepPlan.Integration(
         new Content.Rigid(start.volume()),
         start.amount(),
-        new Carried.Own(),
+        outwards.carried(),
         new Opening.ByState(law),
         duration,
-        guard,
+        outwards.guard(),
         until,
         !timed,
-        Optional.of(inside -> hole.through(gas, inside, atmosphere).choked()),
-        OptionalDouble.empty());
-  }
-
-  /** Rate out of the vessel, mol/s, zero or above. */
-  private double rate(Orifice hole, State inside) {
-    double over = inside.pressure() / atmosphere - 1;
-    if (over <= 0) {
-      return 0;
-    }
-    double massFlow = hole.through(gas, inside, atmosphere).massFlow();
-    double rounded = over < NEARLY_EMPTY ? Math.sqrt(over / NEARLY_EMPTY) : 1;
-    return rounded * massFlow / gas.molarMass();
+        Optional.of(law::choked),
+        outwards.jetBore());
   }
 
   private StepPlan compress(Step.Compress compress, VesselCondition start, State state) {
@@ -244,38 +240,25 @@ final class StepPlanner {
         OptionalDouble.empty());
   }
 
-  static StepPlan.Integration rigid(
-      VesselCondition start,
-      Carried carried,
-      Opening opening,
-      double duration,
-      GasWallSystem.Guard guard) {
+  /** A closed vessel for a time. */
+  static StepPlan.Integration closed(VesselCondition start, double duration) {
+    Stream none = new Stream(1, new Carried.Own(), StepPlan.NO_GUARD, OptionalDouble.empty());
+    return rigid(start, none, new Opening.Constant(0), duration);
+  }
+
+  private static StepPlan.Integration rigid(
+      VesselCondition start, Stream stream, Opening opening, double duration) {
     return new StepPlan.Integration(
         new Content.Rigid(start.volume()),
         start.amount(),
-        carried,
+        stream.carried(),
         opening,
         duration,
-        guard,
+        stream.guard(),
         OptionalDouble.empty(),
         false,
         Optional.empty(),
-        OptionalDouble.empty());
-  }
-
-  private static StepPlan.Integration withJet(
-      StepPlan.Integration plan, OptionalDouble inletDiameter) {
-    return new StepPlan.Integration(
-        plan.content(),
-        plan.startExtent(),
-        plan.carried(),
-        plan.opening(),
-        plan.duration(),
-        plan.guard(),
-        plan.endPressure(),
-        plan.mustReach(),
-        plan.choked(),
-        inletDiameter);
+        stream.jetBore());
   }
 
   private static StepPlan over(double until, State state) {
