@@ -14,6 +14,7 @@ import static org.gasmargin.process.modelled.Jobs.vessel;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import org.gasmargin.gas.IdealGas;
 import org.gasmargin.process.Path;
 import org.gasmargin.process.PathPoint;
 import org.gasmargin.vessel.Vessel;
@@ -26,7 +27,7 @@ import org.junit.jupiter.api.Test;
  */
 class ClosedFormTest {
   private static final double MOLAR_MASS = 0.028;
-  private static final PerfectGas DIATOMIC = new PerfectGas(1.4, MOLAR_MASS);
+  private static final IdealGas DIATOMIC = Jobs.perfectGas(1.4, MOLAR_MASS);
 
   /** A wall that takes no heat. */
   private static final Wall TIGHT = plate(1, 0, 0, layer(STEEL, 0.006));

@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.gasmargin.gas.Gas;
+import org.gasmargin.gas.IdealGas;
 import org.gasmargin.process.Drive;
 import org.gasmargin.process.Path;
 import org.gasmargin.process.PathOutcome;
@@ -25,6 +26,10 @@ final class Jobs {
   private Jobs() {}
 
   static final Material STEEL = material(7850, 45, 470);
+
+  static IdealGas perfectGas(double gamma, double molarMass) {
+    return new IdealGas("perfect", "Perfect gas", molarMass, gamma);
+  }
 
   static Material material(double density, double conductivity, double heatCapacity) {
     return new Material(
