@@ -18,7 +18,7 @@ final class ExampleRun {
   private ExampleRun() {}
 
   static ExampleOutcome of(Rule rule, RuleExample example) {
-    RuleOutcome outcome = RuleJudging.judge(rule, view(example));
+    RuleOutcome outcome = judge(rule, example);
     Optional<Verdict> verdict = Optional.empty();
     String reason = "";
     if (outcome instanceof RuleOutcome.Found found) {
@@ -33,6 +33,11 @@ final class ExampleRun {
         RuleExample.words(example.expected()),
         RuleExample.words(verdict),
         reason);
+  }
+
+  /** What the rule says of the example's case. */
+  static RuleOutcome judge(Rule rule, RuleExample example) {
+    return RuleJudging.judge(rule, view(example));
   }
 
   /** Facts that an example leaves out are false or an empty word; numbers are unknown. */

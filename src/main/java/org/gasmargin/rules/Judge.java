@@ -1,8 +1,8 @@
 package org.gasmargin.rules;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.EnumSet;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
@@ -21,7 +21,7 @@ public final class Judge {
   private final List<RulePack> packs;
   private final List<Finding> findings = new ArrayList<>();
   private final List<NotApplied> notApplied = new ArrayList<>();
-  private final Map<String, PackUsed> used = new LinkedHashMap<>();
+  private final Map<String, PackUsed> used = new TreeMap<>();
   private final Map<String, Set<LimitKind>> limitsUsed = new TreeMap<>();
 
   private Judge(JudgingCase subject, List<RulePack> packs) {
@@ -47,6 +47,7 @@ public final class Judge {
       judge(step);
     }
     addUnusedLimits(procedure);
+    notApplied.sort(Comparator.comparing(NotApplied::rule));
     return new Judgement(subject.judgeOn(), findings, List.copyOf(used.values()), notApplied);
   }
 
@@ -73,7 +74,9 @@ public final class Judge {
         pack.rules().forEach(rule -> apply(rule, view));
       }
     }
-    if (findings.size() == before) {
+    List<Finding> ofStep = findings.subList(before, findings.size());
+    ofStep.sort(Comparator.comparing(Finding::rule));
+    if (ofStep.isEmpty()) {
       addOwn(step, "judging.no_rule_applies", "no rule of the packs used applies to this step");
     }
   }

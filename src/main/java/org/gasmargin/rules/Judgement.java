@@ -8,7 +8,7 @@ import java.util.List;
  *
  * @param judgedOn bounds or modelled path
  * @param findings never empty
- * @param packs the rule packs that were used, in the order of use
+ * @param packs the rule packs that were used, by name
  * @param notApplied rules that were looked at and do not concern a step, with the reason
  */
 public record Judgement(

@@ -73,16 +73,17 @@ final class RuleJudging {
   }
 
   private Finding judged(Operand.Figure predicted, LimitInForce limit, double required) {
-    double margin = resolved(rule.direction().margin(limit.value(), predicted.si()), limit);
-    Verdict verdict;
-    String reason;
+    double margin = margin(predicted.si(), limit.value());
     if (!(Double.isFinite(margin) && Double.isFinite(required) && required >= 0)) {
       unknown.add("the margin cannot be calculated");
       return notAssessed(predicted, Optional.of(limit));
-    } else if (margin < 0) {
+    }
+    Verdict verdict;
+    String reason;
+    if (margin < 0) {
       verdict = Verdict.OVER_LIMIT;
       reason = format(-margin) + " beyond the limit";
-    } else if (margin < required) {
+    } else if (margin < required - RESOLUTION * Math.abs(limit.value())) {
       verdict = Verdict.MARGIN_SHORT;
       reason =
           format(margin) + " inside the limit, less than the " + format(required) + " asked for";
@@ -102,9 +103,10 @@ final class RuleJudging {
         reason + limit.notes());
   }
 
-  /** A margin that is smaller than the arithmetic resolves is none: neither inside nor beyond. */
-  private static double resolved(double margin, LimitInForce limit) {
-    return Math.abs(margin) <= RESOLUTION * Math.abs(limit.value()) ? 0 : margin;
+  /** The distance to the limit; zero where round-off decides on which side it lies. */
+  private double margin(double predicted, double limit) {
+    double margin = rule.direction().margin(limit, predicted);
+    return Math.abs(margin) <= RESOLUTION * Math.abs(limit) ? 0 : margin;
   }
 
   private Finding notAssessed(Operand quantity, Optional<LimitInForce> limit) {
