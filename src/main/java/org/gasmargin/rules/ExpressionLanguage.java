@@ -18,6 +18,7 @@ import dev.cel.runtime.CelRuntimeFactory;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.regex.Pattern;
 import org.gasmargin.units.Dimension;
 import org.gasmargin.units.Place;
 import org.gasmargin.yaml.Issues;
@@ -34,6 +35,7 @@ final class ExpressionLanguage {
   static final int LONGEST = 500;
 
   private static final int DEEPEST = 32;
+  private static final Pattern SINGLE_EQUALS = Pattern.compile("[^=<>!]=[^=]");
 
   private final CelCompiler compiler;
   private final CelRuntime runtime;
@@ -87,12 +89,8 @@ final class ExpressionLanguage {
   private Optional<Expression> compileCompound(Text source, Scope scope, Issues issues) {
     int before = issues.count();
     CelValidationResult parsed = compiler.parse(source.value());
-    for (CelIssue issue : parsed.getErrors()) {
-      issues.add(
-          place(source, issue),
-          Printable.quote(source.value()) + " is not an expression: " + issue.getMessage());
-    }
-    if (issues.count() > before) {
+    if (parsed.hasError()) {
+      refuseSyntax(source, parsed.getErrors().get(0), issues);
       return Optional.empty();
     }
     try {
@@ -128,6 +126,14 @@ final class ExpressionLanguage {
     }
     return Optional.of(
         new Expression.Compound(source.value(), names, dimension, runtime.createProgram(ast)));
+  }
+
+  /** Only the first error of a syntax is told; those behind it follow from it. */
+  private static void refuseSyntax(Text source, CelIssue first, Issues issues) {
+    issues.add(
+        place(source, first),
+        Printable.quote(source.value()) + " is not an expression: " + first.getMessage(),
+        SINGLE_EQUALS.matcher(source.value()).find() ? "to compare, write ==" : "");
   }
 
   private static Place place(Text source, CelIssue issue) {

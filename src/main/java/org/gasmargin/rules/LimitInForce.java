@@ -4,6 +4,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 import org.gasmargin.units.Dimension;
 import org.gasmargin.units.Interval;
 
@@ -25,7 +26,7 @@ record LimitInForce(double value, String origin, Operand requiredMargin, String 
    * @param unknown receives the reason if the default limit cannot be evaluated
    */
   static Optional<LimitInForce> of(
-      Rule rule, StepView view, Operand marginOfRule, List<String> unknown) {
+      Rule rule, StepView view, Operand marginOfRule, Set<String> unknown) {
     Optional<Operand> standard = rule.defaultLimit().map(d -> d.value().evaluate(view.operands()));
     Optional<Limit> own =
         rule.limit().flatMap(kind -> strictest(view.limits(), kind, rule.direction()));

@@ -1,9 +1,9 @@
 package org.gasmargin.rules;
 
-import java.util.ArrayList;
-import java.util.List;
+import java.util.LinkedHashSet;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 import org.gasmargin.units.Dimension;
 
 /**
@@ -17,7 +17,7 @@ final class RuleJudging {
   private final Rule rule;
   private final StepView view;
   private final Dimension difference;
-  private final List<String> unknown = new ArrayList<>();
+  private final Set<String> unknown = new LinkedHashSet<>();
 
   private RuleJudging(Rule rule, StepView view) {
     this.rule = rule;
@@ -34,9 +34,9 @@ final class RuleJudging {
     if (rule.condition().isPresent()) {
       Rule.Condition condition = rule.condition().get();
       Operand applies = condition.when().evaluate(view.operands());
-      if (applies instanceof Operand.Unknown reason) {
+      if (applies instanceof Operand.Unknown reason && view.distrust().isEmpty()) {
         unknown.add("it is not known whether the rule applies: " + reason.reason());
-      } else if (!(applies instanceof Operand.Truth truth && truth.holds())) {
+      } else if (applies instanceof Operand.Truth truth && !truth.holds()) {
         return new RuleOutcome.Silent(
             new NotApplied(rule.id(), view.step(), "applies only when " + condition.words()));
       }
