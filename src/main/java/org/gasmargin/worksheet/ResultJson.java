@@ -50,7 +50,7 @@ public final class ResultJson {
     return text.toString();
   }
 
-  /** Writes the result, with a line feed at the end, and leaves the writer open. */
+  /** Writes the result and leaves the writer open. */
   public static void write(WorksheetContent content, Writer target) throws IOException {
     DefaultIndenter indenter = new DefaultIndenter("  ", "\n");
     JsonFactory factory =
@@ -60,7 +60,6 @@ public final class ResultJson {
           new DefaultPrettyPrinter().withObjectIndenter(indenter).withArrayIndenter(indenter));
       new ResultJson(content, generator).writeAll();
     }
-    target.write('\n');
   }
 
   private void writeAll() throws IOException {
