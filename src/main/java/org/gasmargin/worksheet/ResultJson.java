@@ -2,13 +2,11 @@ package org.gasmargin.worksheet;
 
 import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonGenerator;
-import com.fasterxml.jackson.core.StreamWriteFeature;
 import com.fasterxml.jackson.core.util.DefaultIndenter;
 import com.fasterxml.jackson.core.util.DefaultPrettyPrinter;
 import java.io.IOException;
 import java.io.StringWriter;
 import java.io.UncheckedIOException;
-import java.io.Writer;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -39,27 +37,18 @@ public final class ResultJson {
     this.json = json;
   }
 
-  /** The result as text. */
+  /** The result as text, without a line end behind it. */
   public static String text(WorksheetContent content) {
+    DefaultIndenter indenter = new DefaultIndenter("  ", "\n");
     StringWriter text = new StringWriter();
-    try {
-      write(content, text);
+    try (JsonGenerator generator = new JsonFactory().createGenerator(text)) {
+      generator.setPrettyPrinter(
+          new DefaultPrettyPrinter().withObjectIndenter(indenter).withArrayIndenter(indenter));
+      new ResultJson(content, generator).writeAll();
     } catch (IOException e) {
       throw new UncheckedIOException(e);
     }
     return text.toString();
-  }
-
-  /** Writes the result and leaves the writer open. */
-  public static void write(WorksheetContent content, Writer target) throws IOException {
-    DefaultIndenter indenter = new DefaultIndenter("  ", "\n");
-    JsonFactory factory =
-        JsonFactory.builder().disable(StreamWriteFeature.AUTO_CLOSE_TARGET).build();
-    try (JsonGenerator generator = factory.createGenerator(target)) {
-      generator.setPrettyPrinter(
-          new DefaultPrettyPrinter().withObjectIndenter(indenter).withArrayIndenter(indenter));
-      new ResultJson(content, generator).writeAll();
-    }
   }
 
   private void writeAll() throws IOException {

@@ -1,9 +1,5 @@
 package org.gasmargin.worksheet;
 
-import java.io.IOException;
-import java.io.StringWriter;
-import java.io.UncheckedIOException;
-import java.io.Writer;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -22,32 +18,21 @@ public final class SeriesCsv {
 
   private SeriesCsv() {}
 
-  /** The series as text. */
+  /** The series of every path that was computed. */
   public static String text(WorksheetContent content) {
-    StringWriter text = new StringWriter();
-    try {
-      write(content, text);
-    } catch (IOException e) {
-      throw new UncheckedIOException(e);
-    }
-    return text.toString();
-  }
-
-  /** Writes the series and leaves the writer open. */
-  public static void write(WorksheetContent content, Writer target) throws IOException {
-    target.write(HEAD);
+    StringBuilder text = new StringBuilder(HEAD);
     for (StepResult step : content.result().steps()) {
       for (PathKind kind : PathKind.values()) {
         Optional<Path> path = step.path(kind);
         if (path.isPresent()) {
-          String start =
-              quoted(step.step().id()) + "," + kind.name().toLowerCase(Locale.ROOT) + ",";
+          String start = quoted(step.step().id()) + "," + kind.name().toLowerCase(Locale.ROOT);
           for (PathPoint point : path.get().points()) {
-            target.write(start + numbers(point) + "\n");
+            text.append(start).append(',').append(numbers(point)).append('\n');
           }
         }
       }
     }
+    return text.toString();
   }
 
   private static String numbers(PathPoint point) {

@@ -15,7 +15,6 @@ import java.util.Random;
 import org.gasmargin.process.Envelope;
 import org.gasmargin.process.Extreme;
 import org.gasmargin.process.ProcedureResult;
-import org.gasmargin.process.StepResult;
 import org.gasmargin.units.Interval;
 import org.gasmargin.yaml.Issues;
 import org.junit.jupiter.api.Test;
@@ -285,20 +284,7 @@ class JudgeTest {
 
   @Test
   void aFailedPathLeavesTheRateUnknown() {
-    StepResult failed = SampleCase.fill().outOfRange("too cold").result();
-    StepResult sound = SampleCase.fill().result();
-    StepResult mixed =
-        new StepResult(
-            sound.step(),
-            failed.paths(),
-            sound.envelope(),
-            sound.credited(),
-            sound.closure(),
-            sound.settledAmount(),
-            List.of(),
-            List.of(),
-            Optional.empty());
-    Judgement judgement = SampleCase.fill().with(mixed).judge(PACKS);
+    Judgement judgement = SampleCase.fill().with(SampleCase.failed("too cold")).judge(PACKS);
     Finding rate = finding(judgement, "cylinder_fill.fill_rate").orElseThrow();
     assertEquals(Verdict.NOT_ASSESSED, rate.verdict());
     assertEquals(

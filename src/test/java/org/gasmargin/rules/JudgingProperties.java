@@ -47,7 +47,7 @@ class JudgingProperties {
     double stricter = rule.direction() == Direction.AT_MOST ? limit - step : limit + step;
     Verdict before = judge(rule, predicted, Interval.exactly(limit), OptionalDouble.empty());
     Verdict after = judge(rule, predicted, Interval.exactly(stricter), OptionalDouble.empty());
-    assertTrue(after.compareTo(before) >= 0, before + " became " + after);
+    assertNotBetter(after, before);
   }
 
   @Property(seed = "20260102", tries = 400)
@@ -60,7 +60,7 @@ class JudgingProperties {
     Verdict before = judge(rule, predicted, Interval.around(limit, narrow), OptionalDouble.empty());
     Verdict after =
         judge(rule, predicted, Interval.around(limit, narrow + more), OptionalDouble.empty());
-    assertTrue(after.compareTo(before) >= 0, before + " became " + after);
+    assertNotBetter(after, before);
   }
 
   @Property(seed = "20260103", tries = 400)
@@ -74,7 +74,7 @@ class JudgingProperties {
     Interval typed = Interval.exactly(limit);
     Verdict before = judge(rule, predicted, typed, OptionalDouble.of(margin * unit));
     Verdict after = judge(rule, predicted, typed, OptionalDouble.of((margin + more) * unit));
-    assertTrue(after.compareTo(before) >= 0, before + " became " + after);
+    assertNotBetter(after, before);
   }
 
   @Property(seed = "20260104", tries = 400)
@@ -87,7 +87,7 @@ class JudgingProperties {
     Interval typed = Interval.exactly(limit);
     Verdict before = judge(rule, predicted, typed, OptionalDouble.empty());
     Verdict after = judge(rule, worse, typed, OptionalDouble.empty());
-    assertTrue(after.compareTo(before) >= 0, before + " became " + after);
+    assertNotBetter(after, before);
   }
 
   @Property(seed = "20260105", tries = 400)
@@ -126,6 +126,10 @@ class JudgingProperties {
               && unknown.reason().equals("the " + name + " was lost"),
           text + " gave " + value);
     }
+  }
+
+  private static void assertNotBetter(Verdict after, Verdict before) {
+    assertTrue(after.compareTo(before) >= 0, before + " became " + after);
   }
 
   /** Random conditions of pressures, temperatures and facts joined by every operator. */

@@ -149,82 +149,33 @@ record SampleCase(
   }
 
   SampleCase with(Optional<Closure> closure) {
-    return with(
-        new StepResult(
-            step,
-            result.paths(),
-            result.envelope(),
-            result.credited(),
-            closure,
-            result.settledAmount(),
-            List.of(),
-            List.of(),
-            result.modelledCheckFailure()));
+    return with(result(step, result.paths(), result.envelope(), result.credited(), closure));
   }
 
   SampleCase with(Envelope envelope) {
-    return with(
-        new StepResult(
-            step,
-            result.paths(),
-            envelope,
-            result.credited(),
-            result.closure(),
-            result.settledAmount(),
-            List.of(),
-            List.of(),
-            Optional.empty()));
+    return with(result(step, result.paths(), envelope, result.credited(), result.closure()));
+  }
+
+  SampleCase with(Map<PathKind, PathOutcome> paths) {
+    return with(result(step, paths, result.envelope(), result.credited(), result.closure()));
   }
 
   SampleCase with(StepResult.Credited credited) {
     return with(
-        new StepResult(
-            step,
-            result.paths(),
-            result.envelope(),
-            Optional.of(credited),
-            result.closure(),
-            result.settledAmount(),
-            List.of(),
-            List.of(),
-            Optional.empty()));
+        result(step, result.paths(), result.envelope(), Optional.of(credited), result.closure()));
   }
 
   SampleCase with(StepResult.DensityRange amount) {
-    return with(
-        new StepResult(
-            step,
-            result.paths(),
-            result.envelope(),
-            result.credited(),
-            result.closure(),
-            Optional.of(amount),
-            List.of(),
-            List.of(),
-            Optional.empty()));
+    return with(withAmount(Optional.of(amount), Optional.empty()));
   }
 
   /** The modelled path contradicts the bounds. */
   SampleCase contradicted(String reason) {
-    return with(
-        new StepResult(
-            step,
-            result.paths(),
-            result.envelope(),
-            result.credited(),
-            result.closure(),
-            result.settledAmount(),
-            List.of(),
-            List.of(),
-            Optional.of(reason)));
+    return with(withAmount(result.settledAmount(), Optional.of(reason)));
   }
 
   /** Every path left the validity of its model, so that no extreme and no amount is known. */
   SampleCase outOfRange(String reason) {
-    Map<PathKind, PathOutcome> failed = new EnumMap<>(PathKind.class);
-    for (PathKind kind : PathKind.values()) {
-      failed.put(kind, new PathOutcome.Failed(reason));
-    }
     Envelope nothing =
         new Envelope(
             Optional.empty(),
@@ -235,17 +186,50 @@ record SampleCase(
             AMBIENT,
             AMBIENT,
             List.of(reason));
-    return with(
-        new StepResult(
-            step,
-            failed,
-            nothing,
-            Optional.empty(),
-            result.closure(),
-            Optional.empty(),
-            List.of(),
-            List.of(),
-            Optional.empty()));
+    SampleCase lost =
+        with(result(step, failed(reason), nothing, Optional.empty(), result.closure()));
+    return lost.with(lost.withAmount(Optional.empty(), Optional.empty()));
+  }
+
+  /** Every path failed. */
+  static Map<PathKind, PathOutcome> failed(String reason) {
+    Map<PathKind, PathOutcome> failed = new EnumMap<>(PathKind.class);
+    for (PathKind kind : PathKind.values()) {
+      failed.put(kind, new PathOutcome.Failed(reason));
+    }
+    return failed;
+  }
+
+  private StepResult withAmount(
+      Optional<StepResult.DensityRange> amount, Optional<String> contradiction) {
+    return new StepResult(
+        step,
+        result.paths(),
+        result.envelope(),
+        result.credited(),
+        result.closure(),
+        amount,
+        List.of(),
+        List.of(),
+        contradiction);
+  }
+
+  private static StepResult result(
+      Step step,
+      Map<PathKind, PathOutcome> paths,
+      Envelope envelope,
+      Optional<StepResult.Credited> credited,
+      Optional<Closure> closure) {
+    return new StepResult(
+        step,
+        paths,
+        envelope,
+        credited,
+        closure,
+        Optional.of(new StepResult.DensityRange(5000, 6000)),
+        List.of(),
+        List.of(),
+        Optional.empty());
   }
 
   static Gas gas(String id) {
@@ -298,16 +282,12 @@ record SampleCase(
     for (PathKind kind : PathKind.values()) {
       paths.put(kind, new PathOutcome.Computed(path()));
     }
-    return new StepResult(
+    return result(
         step,
         paths,
         envelope,
         Optional.of(credited(310, 292)),
-        Optional.of(new Closure(1e-14, 1e-13)),
-        Optional.of(new StepResult.DensityRange(5000, 6000)),
-        List.of(),
-        List.of(),
-        Optional.empty());
+        Optional.of(new Closure(1e-14, 1e-13)));
   }
 
   private static Envelope envelope(double hottest, double coldest, double unmixed) {
