@@ -1,7 +1,5 @@
 package org.gasmargin.rules;
 
-import dev.cel.checker.CelStandardDeclarations;
-import dev.cel.checker.CelStandardDeclarations.StandardFunction;
 import dev.cel.common.CelAbstractSyntaxTree;
 import dev.cel.common.CelIssue;
 import dev.cel.common.CelOptions;
@@ -15,7 +13,9 @@ import dev.cel.compiler.CelCompilerFactory;
 import dev.cel.runtime.CelEvaluationException;
 import dev.cel.runtime.CelRuntime;
 import dev.cel.runtime.CelRuntimeFactory;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.regex.Pattern;
@@ -37,10 +37,11 @@ final class ExpressionLanguage {
   private static final int DEEPEST = 32;
   private static final Pattern SINGLE_EQUALS = Pattern.compile("[^=<>!]=[^=]");
 
+  private final Map<String, Expression> compiled = new HashMap<>();
   private final CelCompiler compiler;
   private final CelRuntime runtime;
 
-  /** Sets the language up; costs some tens of milliseconds, so once a run. */
+  /** Sets the language up; costs a tenth of a second in a cold start, so once a run. */
   ExpressionLanguage() {
     FunctionTable functions = new FunctionTable();
     CelOptions options =
@@ -53,6 +54,7 @@ final class ExpressionLanguage {
     runtime =
         CelRuntimeFactory.legacyCelRuntimeBuilder()
             .setOptions(options)
+            .setStandardEnvironmentEnabled(false)
             .addFunctionBindings(functions.bindings())
             .build();
   }
@@ -67,7 +69,18 @@ final class ExpressionLanguage {
    */
   Optional<Expression> compile(Text source, Scope scope, Issues issues) {
     Optional<Expression> simple = simple(source.value(), scope);
-    return simple.isPresent() ? simple : compileCompound(source, scope, issues);
+    if (simple.isPresent()) {
+      return simple;
+    }
+    Optional<Expression> before =
+        Optional.ofNullable(compiled.get(source.value()))
+            .filter(expression -> expression.names().stream().allMatch(scope::permits));
+    if (before.isPresent()) {
+      return before;
+    }
+    Optional<Expression> compound = compileCompound(source, scope, issues);
+    compound.ifPresent(expression -> compiled.put(source.value(), expression));
+    return compound;
   }
 
   /** What needs no checker: most expressions of a pack are one figure or one name. */
@@ -147,14 +160,6 @@ final class ExpressionLanguage {
             .setOptions(options)
             .setStandardMacros(List.of())
             .setStandardEnvironmentEnabled(false)
-            .setStandardDeclarations(
-                CelStandardDeclarations.newBuilder()
-                    .includeFunctions(
-                        StandardFunction.CONDITIONAL,
-                        StandardFunction.LOGICAL_NOT,
-                        StandardFunction.LOGICAL_AND,
-                        StandardFunction.LOGICAL_OR)
-                    .build())
             .addFunctionDeclarations(functions.declarations());
     for (String name : Vocabulary.all()) {
       builder.addVar(name, typeOf(name));

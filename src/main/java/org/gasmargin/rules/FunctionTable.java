@@ -5,6 +5,7 @@ import dev.cel.common.CelOverloadDecl;
 import dev.cel.common.types.CelType;
 import dev.cel.common.types.OpaqueType;
 import dev.cel.common.types.SimpleType;
+import dev.cel.common.types.TypeParamType;
 import dev.cel.runtime.CelFunctionBinding;
 import java.util.ArrayList;
 import java.util.EnumMap;
@@ -16,8 +17,9 @@ import java.util.Optional;
 import org.gasmargin.units.Dimension;
 
 /**
- * The functions of the rule language, declared for the checker and bound for the run. Every
- * dimension is an opaque type of its own, so that only what {@link Arithmetic} permits can meet.
+ * The functions of the rule language, declared for the checker and bound for the run; there are no
+ * others, the library's own environment is switched off. Every dimension is an opaque type of its
+ * own, so that only what {@link Arithmetic} permits can meet.
  */
 final class FunctionTable {
   private static final Map<Dimension, CelType> TYPES = types();
@@ -37,6 +39,7 @@ final class FunctionTable {
     for (Constant constant : Constant.values()) {
       add(constant);
     }
+    addLogic();
   }
 
   /** The declarations for the checker. */
@@ -118,6 +121,20 @@ final class FunctionTable {
     declare(function, CelOverloadDecl.newGlobalOverload(id, SimpleType.BOOL, type, type));
     bindings.add(
         CelFunctionBinding.from(id, valueClass, valueClass, (a, b) -> a.equals(b) == wanted));
+  }
+
+  /**
+   * The logical operations under the identifiers by which the library knows them; it runs all but
+   * the negation itself.
+   */
+  private void addLogic() {
+    CelType bool = SimpleType.BOOL;
+    CelType any = TypeParamType.create("A");
+    declare("_&&_", CelOverloadDecl.newGlobalOverload("logical_and", bool, bool, bool));
+    declare("_||_", CelOverloadDecl.newGlobalOverload("logical_or", bool, bool, bool));
+    declare("!_", CelOverloadDecl.newGlobalOverload("logical_not", bool, bool));
+    declare("_?_:_", CelOverloadDecl.newGlobalOverload("conditional", any, bool, any, any));
+    bindings.add(CelFunctionBinding.from("logical_not", Boolean.class, truth -> !truth));
   }
 
   private void add(Constant constant) {
