@@ -12,6 +12,7 @@ import org.gasmargin.units.Dimension;
  * @param step identifier of the step
  * @param vessel name of the vessel
  * @param verdict the word
+ * @param severity what breaking the rule means
  * @param quantity what is predicted, in words
  * @param dimension of predicted, limit, margin and required margin (margins: its difference)
  * @param predicted SI; empty if unknown
@@ -31,6 +32,7 @@ public record Finding(
     String step,
     String vessel,
     Verdict verdict,
+    Severity severity,
     String quantity,
     Dimension dimension,
     OptionalDouble predicted,

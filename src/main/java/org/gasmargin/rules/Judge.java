@@ -24,6 +24,9 @@ public final class Judge {
   private final Map<String, PackUsed> used = new TreeMap<>();
   private final Map<String, Set<LimitKind>> limitsUsed = new TreeMap<>();
 
+  /** By vessel: why nothing computed from here on may be judged. */
+  private final Map<String, String> distrusted = new TreeMap<>();
+
   private Judge(JudgingCase subject, List<RulePack> packs) {
     this.subject = subject;
     this.packs = packs;
@@ -66,6 +69,7 @@ public final class Judge {
     }
     if (result.isEmpty() || vessel.isEmpty()) {
       addOwn(step, "judging.not_computed", "the step was not computed");
+      distrustFrom(step, "it was not computed");
       return;
     }
     StepView view = view(result.get(), vessel.get());
@@ -111,7 +115,9 @@ public final class Judge {
 
   private StepView view(StepResult result, Vessel vessel) {
     List<Limit> limits = limits(vessel.name());
-    Optional<String> distrust = distrust(result);
+    Optional<String> distrust =
+        Optional.ofNullable(distrusted.get(vessel.name())).or(() -> distrust(result));
+    distrust.ifPresent(why -> distrustFrom(result.step(), why));
     Operands operands =
         StepOperands.of(
             result,
@@ -122,6 +128,11 @@ public final class Judge {
             distrust);
     return new StepView(
         result.step().id(), vessel.name(), operands, limits, distrust, subject.units());
+  }
+
+  /** What cannot be judged in one step cannot be the start of another. */
+  private void distrustFrom(Step step, String why) {
+    distrusted.putIfAbsent(step.vessel(), "step " + step.id() + " cannot be judged: " + why);
   }
 
   private List<Limit> limits(String vessel) {

@@ -4,7 +4,7 @@ import java.util.Comparator;
 import java.util.List;
 
 /**
- * The findings of a job, worst first.
+ * The findings of a job: the worst verdict first, dangers first within one verdict.
  *
  * @param judgedOn bounds or modelled path
  * @param findings never empty
@@ -14,12 +14,15 @@ import java.util.List;
 public record Judgement(
     JudgeOn judgedOn, List<Finding> findings, List<PackUsed> packs, List<NotApplied> notApplied) {
 
-  /** Sorts worst first and keeps the order of steps within one verdict. */
+  private static final Comparator<Finding> WORST_FIRST =
+      Comparator.comparing(Finding::verdict).reversed().thenComparing(Finding::severity);
+
+  /** Sorts worst first; what is equally bad keeps the order of steps. */
   public Judgement {
     if (findings.isEmpty()) {
       throw new IllegalArgumentException("a judgement without findings would look like a pass");
     }
-    findings = findings.stream().sorted(Comparator.comparing(Finding::verdict).reversed()).toList();
+    findings = findings.stream().sorted(WORST_FIRST).toList();
     packs = List.copyOf(packs);
     notApplied = List.copyOf(notApplied);
   }

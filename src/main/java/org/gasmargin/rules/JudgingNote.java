@@ -16,6 +16,7 @@ final class JudgingNote {
         step.id(),
         step.vessel(),
         Verdict.NOT_ASSESSED,
+        Severity.DANGER,
         "none",
         Dimension.RATIO,
         OptionalDouble.empty(),

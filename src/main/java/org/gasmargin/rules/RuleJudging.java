@@ -133,6 +133,7 @@ final class RuleJudging {
         view.step(),
         view.vessel(),
         verdict,
+        rule.severity(),
         rule.predicted().name(),
         rule.predicted().dimension(),
         predicted,

@@ -1,6 +1,6 @@
 package org.gasmargin.rules;
 
-/** What it means when a rule is broken. */
+/** What it means when a rule is broken, the worst first. */
 public enum Severity {
   /** People can be hurt. */
   DANGER("danger"),

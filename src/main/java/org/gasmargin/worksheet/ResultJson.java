@@ -156,6 +156,7 @@ public final class ResultJson {
     json.writeStringField("step", finding.step());
     json.writeStringField("vessel", finding.vessel());
     json.writeStringField("verdict", finding.verdict().words());
+    json.writeStringField("severity", finding.severity().key());
     json.writeStringField("quantity", finding.quantity());
     number("predicted", boxed(finding.predicted()));
     number("limit", boxed(finding.limit()));

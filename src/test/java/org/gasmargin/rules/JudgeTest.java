@@ -12,9 +12,13 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Random;
+import org.gasmargin.process.Closure;
 import org.gasmargin.process.Envelope;
 import org.gasmargin.process.Extreme;
+import org.gasmargin.process.Procedure;
 import org.gasmargin.process.ProcedureResult;
+import org.gasmargin.process.Step;
+import org.gasmargin.process.StepResult;
 import org.gasmargin.units.Interval;
 import org.gasmargin.yaml.Issues;
 import org.junit.jupiter.api.Test;
@@ -31,6 +35,60 @@ class JudgeTest {
     assertEquals("oxygen.pressurisation", judgement.findings().get(0).rule());
     List<Verdict> verdicts = judgement.findings().stream().map(Finding::verdict).toList();
     assertEquals(verdicts.stream().sorted(Collections.reverseOrder()).toList(), verdicts);
+  }
+
+  @Test
+  void dangersComeFirstAmongEquallyBadFindings() {
+    SampleCase fast =
+        SampleCase.fill()
+            .withLimit(SampleCase.limit(LimitKind.MAX_PRESSURE_RATE, 1e4))
+            .withLimit(SampleCase.limit(LimitKind.MAX_PRESSURE, 100e5));
+    List<Severity> severities =
+        fast.judge(PACKS).findings().stream()
+            .filter(finding -> finding.verdict() == Verdict.OVER_LIMIT)
+            .map(Finding::severity)
+            .toList();
+    assertEquals(
+        List.of(Severity.DANGER, Severity.DANGER, Severity.DAMAGE, Severity.DAMAGE), severities);
+  }
+
+  @Test
+  void whatCannotBeJudgedInOneStepIsNoStartForTheNext() {
+    StepResult broken = SampleCase.fill().with(Optional.of(new Closure(0, 1e-3))).result();
+    StepResult sound = SampleCase.fill().result();
+    Step.Fill first = (Step.Fill) broken.step();
+    Step second =
+        new Step.Fill("2", first.vessel(), first.supply(), first.drive(), first.inletDiameter());
+    JudgingCase one = SampleCase.fill().judgingCase(List.of("general"));
+    Procedure procedure =
+        new Procedure(
+            one.result().procedure().site(),
+            one.result().procedure().vessels(),
+            List.of(first, second));
+    StepResult after =
+        new StepResult(
+            second,
+            sound.paths(),
+            sound.envelope(),
+            sound.credited(),
+            sound.closure(),
+            sound.settledAmount(),
+            List.of(),
+            List.of(),
+            Optional.empty());
+    JudgingCase both =
+        new JudgingCase(
+            new ProcedureResult(procedure, List.of(broken, after)),
+            one.limits(),
+            JudgeOn.BOUNDS,
+            List.of("general"),
+            SampleCase.UNITS);
+    List<Finding> findings = Judge.judge(both, PACKS).findings();
+    assertTrue(findings.stream().allMatch(f -> f.verdict() == Verdict.NOT_ASSESSED));
+    assertTrue(
+        findings.stream()
+            .filter(f -> f.step().equals("2") && f.rule().startsWith("general."))
+            .allMatch(f -> f.reason().contains("step 1 cannot be judged: the balances do not")));
   }
 
   @Test

@@ -30,6 +30,7 @@ import org.gasmargin.process.Step;
 import org.gasmargin.process.StepResult;
 import org.gasmargin.rules.Finding;
 import org.gasmargin.rules.JudgeOn;
+import org.gasmargin.rules.Severity;
 import org.gasmargin.rules.Verdict;
 import org.gasmargin.units.Dimension;
 import org.junit.jupiter.api.Test;
@@ -295,6 +296,7 @@ class ResultJsonTest {
             "1",
             "receiver",
             Verdict.NOT_ASSESSED,
+            Severity.DANGER,
             "highest pressure",
             Dimension.ABSOLUTE_PRESSURE,
             OptionalDouble.empty(),

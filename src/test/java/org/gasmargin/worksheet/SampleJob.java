@@ -25,6 +25,7 @@ import org.gasmargin.rules.Judgement;
 import org.gasmargin.rules.Limit;
 import org.gasmargin.rules.LimitKind;
 import org.gasmargin.rules.PackUsed;
+import org.gasmargin.rules.Severity;
 import org.gasmargin.rules.Verdict;
 import org.gasmargin.units.Dimension;
 import org.gasmargin.units.DisplayUnits;
@@ -343,6 +344,7 @@ final class SampleJob {
             "1",
             "receiver",
             Verdict.NOT_ASSESSED,
+            Severity.DAMAGE,
             "highest metal temperature",
             Dimension.TEMPERATURE,
             OptionalDouble.of(hot),
@@ -375,6 +377,7 @@ final class SampleJob {
         step,
         "receiver",
         verdict,
+        Severity.DAMAGE,
         "furthest " + title.toLowerCase(java.util.Locale.ROOT) + " of the step",
         dimension,
         OptionalDouble.of(predicted),
