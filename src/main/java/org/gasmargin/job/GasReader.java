@@ -42,7 +42,7 @@ final class GasReader {
   }
 
   private Optional<Gas> find(Place place, String path, String name) {
-    Optional<Gas> gas = gases.find(name);
+    Optional<Gas> gas = gases.findGas(name);
     if (gas.isEmpty()) {
       List<String> near = gases.suggestions(name);
       issues.add(

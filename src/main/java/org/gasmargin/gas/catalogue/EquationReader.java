@@ -2,12 +2,14 @@ package org.gasmargin.gas.catalogue;
 
 import java.util.Arrays;
 import java.util.stream.Stream;
+import org.gasmargin.gas.equation.GaoTerms;
 import org.gasmargin.gas.equation.GaussianTerms;
 import org.gasmargin.gas.equation.HelmholtzEquation;
 import org.gasmargin.gas.equation.IdealPowerTerms;
 import org.gasmargin.gas.equation.IdealTerms;
 import org.gasmargin.gas.equation.LeadTerm;
 import org.gasmargin.gas.equation.LogTauTerm;
+import org.gasmargin.gas.equation.NonAnalyticTerms;
 import org.gasmargin.gas.equation.PlanckEinsteinGeneralTerms;
 import org.gasmargin.gas.equation.PlanckEinsteinTerms;
 import org.gasmargin.gas.equation.PowerExponentialTerms;
@@ -57,6 +59,18 @@ final class EquationReader {
           new GaussianTerms(
               rows(node, 7)
                   .map(r -> new GaussianTerms.Term(r[0], r[1], r[2], r[3], r[4], r[5], r[6]))
+                  .toList());
+      case "gao" ->
+          new GaoTerms(
+              rows(node, 8)
+                  .map(r -> new GaoTerms.Term(r[0], r[1], r[2], r[3], r[4], r[5], r[6], r[7]))
+                  .toList());
+      case "non_analytic" ->
+          new NonAnalyticTerms(
+              rows(node, 8)
+                  .map(
+                      r ->
+                          new NonAnalyticTerms.Term(r[0], r[1], r[2], r[3], r[4], r[5], r[6], r[7]))
                   .toList());
       default -> throw node.unknown("kind");
     };

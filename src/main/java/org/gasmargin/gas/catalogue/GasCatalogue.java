@@ -20,20 +20,43 @@ public final class GasCatalogue {
   private static final int MOST_SUGGESTIONS = 3;
 
   private final List<GasSummary> index = GasResources.index();
-  private final ConcurrentMap<String, Gas> loaded = new ConcurrentHashMap<>();
+  private final ConcurrentMap<String, Gas> fluids = new ConcurrentHashMap<>();
+  private final ConcurrentMap<String, Gas> gases = new ConcurrentHashMap<>();
 
   /** What there is, in the order of the index. */
   public List<GasSummary> list() {
     return index;
   }
 
-  /** The gas with this id, name, formula or synonym; upper and lower case are the same. */
+  /**
+   * The fluid with this id, name, formula or synonym, as gas or liquid; upper and lower case are
+   * the same.
+   */
   public Optional<Gas> find(String nameOrSynonym) {
+    return summary(nameOrSynonym)
+        .map(
+            summary ->
+                fluids.computeIfAbsent(
+                    summary.id(), id -> GasReader.read(summary, PhaseReader::boundary)));
+  }
+
+  /**
+   * The same as gas alone: it refuses liquid as it refuses what lies between gas and liquid, so
+   * that a calculation made for gas ends where the gas would condense.
+   */
+  public Optional<Gas> findGas(String nameOrSynonym) {
+    return summary(nameOrSynonym)
+        .map(
+            summary ->
+                gases.computeIfAbsent(
+                    summary.id(), id -> GasReader.read(summary, PhaseReader::gasSide)));
+  }
+
+  private Optional<GasSummary> summary(String nameOrSynonym) {
     String wanted = normal(nameOrSynonym);
     return index.stream()
         .filter(summary -> names(summary).anyMatch(name -> normal(name).equals(wanted)))
-        .findFirst()
-        .map(summary -> loaded.computeIfAbsent(summary.id(), id -> GasReader.read(summary)));
+        .findFirst();
   }
 
   /** Names and synonyms close to a name that was not found, the closest first, at most three. */

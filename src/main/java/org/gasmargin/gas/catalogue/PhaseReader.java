@@ -5,6 +5,7 @@ import java.util.Locale;
 import org.gasmargin.gas.equation.HelmholtzEquation;
 import org.gasmargin.gas.phase.Ancillary;
 import org.gasmargin.gas.phase.DewLine;
+import org.gasmargin.gas.phase.GasSide;
 import org.gasmargin.gas.phase.MeltingLine;
 import org.gasmargin.gas.phase.PhaseBoundary;
 import org.gasmargin.gas.phase.Saturation;
@@ -28,6 +29,14 @@ final class PhaseReader {
               ancillary(node.node("vapour_density")));
       default -> throw node.unknown("kind");
     };
+  }
+
+  /** The same without the liquid: what condenses is refused. */
+  static PhaseBoundary gasSide(DataNode node, HelmholtzEquation equation) {
+    PhaseBoundary boundary = boundary(node, equation);
+    return node.text("kind").equals("saturation")
+        ? new GasSide(boundary, node.number("critical_density"))
+        : boundary;
   }
 
   static Ancillary ancillary(DataNode node) {

@@ -132,8 +132,8 @@ public record FluidLimits(
     double limit = ends.vapourPressure() / PASCAL_PER_BAR;
     if (ends.liquidDensity() == Double.POSITIVE_INFINITY) {
       return refusal(
-          "%s at %.6g K would begin to condense: gas is modelled up to %.6g bar(a) at this"
-              + " temperature, just below its dew pressure",
+          "%s at %.6g K would begin to condense: only gas is modelled, at this temperature up to"
+              + " %.6g bar(a)",
           name, temperature, limit);
     }
     return refusal(

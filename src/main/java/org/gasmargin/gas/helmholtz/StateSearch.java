@@ -12,9 +12,10 @@ import org.gasmargin.gas.phase.PhaseEnds;
  * States from pairs of properties other than temperature and density.
  *
  * <p>At fixed density u, p and s, and at fixed pressure s and h, rise with temperature over the
- * stable states, so there is at most one answer. A few Newton steps are tried first: whatever they
- * reach counts only if it is accepted as a stable state in range. Otherwise the stable range of
- * temperature is bracketed, which either finds the answer or shows that there is none.
+ * stable states, so there is at most one answer; the pressure of cold water, which does not, is
+ * refused. A few Newton steps are tried first: whatever they reach counts only if it is accepted as
+ * a stable state in range. Otherwise the stable range of temperature is bracketed, which either
+ * finds the answer or shows that there is none.
  */
 final class StateSearch {
   private static final int QUICK_STEPS = 15;
@@ -46,6 +47,9 @@ final class StateSearch {
 
   State atDensity(double density, FixedDensity.Property property, double target, double guess) {
     EquationPoint point = equation.newPoint();
+    if (property == FixedDensity.Property.PRESSURE) {
+      requireOneTemperature(point, density, target);
+    }
     FixedDensity function = new FixedDensity(point, density, property, target);
     double start = limits.hasTemperature(guess) ? guess : usualTemperature();
     double quick = quickTemperature(function, start);
@@ -58,6 +62,17 @@ final class StateSearch {
     double coldest = coldestStable(density);
     bracketed(function, coldest, limits.hottest(), start);
     return limits.accept(point);
+  }
+
+  /** Cold water expands as it cools: there a density can meet one pressure at two temperatures. */
+  private void requireOneTemperature(EquationPoint point, double density, double pressure) {
+    point.moveTo(limits.coldest(), density);
+    if (point.dpdT() <= 0 && point.pressure() >= pressure && limits.isStable(point)) {
+      throw FluidLimits.refusal(
+          "%s at a density of %.6g mol/m3: its pressure first falls and then rises as it warms, so"
+              + " that density and pressure do not settle the temperature",
+          limits.name(), density);
+    }
   }
 
   private double quickTemperature(FixedDensity function, double start) {

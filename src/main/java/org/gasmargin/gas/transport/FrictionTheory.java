@@ -27,7 +27,9 @@ public record FrictionTheory(
     /** p - T (dp/dT). */
     ATTRACTIVE,
     /** T (dp/dT) - rho R T. */
-    REPULSIVE
+    REPULSIVE,
+    /** T (dp/dT), the ideal and the repulsive part together. */
+    THERMAL
   }
 
   /**
@@ -66,6 +68,7 @@ public record FrictionTheory(
           case IDEAL -> ideal;
           case ATTRACTIVE -> state.pressure() - thermal;
           case REPULSIVE -> thermal - ideal;
+          case THERMAL -> thermal;
         };
     return pascal / PASCAL_PER_BAR;
   }

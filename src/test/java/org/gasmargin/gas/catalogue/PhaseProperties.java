@@ -33,7 +33,7 @@ class PhaseProperties {
       DataNode equationNode = data.node("equation");
       HelmholtzEquation equation = EquationReader.read(equationNode, data.number("molar_mass"));
       return new Parts(
-          GasReader.read(summary),
+          GasReader.read(summary, PhaseReader::boundary),
           equation,
           PhaseReader.boundary(data.node("phases"), equation),
           equationNode.node("validity").number("max_density"));
@@ -50,8 +50,10 @@ class PhaseProperties {
     }
   }
 
+  private static final GasCatalogue CATALOGUE = new GasCatalogue();
+
   private static final Map<String, Parts> ALL =
-      new GasCatalogue().list().stream().collect(Collectors.toMap(GasSummary::id, Parts::of));
+      CATALOGUE.list().stream().collect(Collectors.toMap(GasSummary::id, Parts::of));
 
   @Provide
   Arbitrary<Parts> all() {
@@ -115,8 +117,37 @@ class PhaseProperties {
     double rt = parts.equation().gasConstant() * t;
     double gibbsVapour = vapour.enthalpy() - t * vapour.entropy();
     double gibbsLiquid = liquid.enthalpy() - t * liquid.entropy();
-    assertEquals(gibbsVapour, gibbsLiquid, 1e-6 * rt);
+    double byTheHair = hair * (vapour.dpdRho() + liquid.dpdRho());
+    assertEquals(gibbsVapour, gibbsLiquid, 1e-6 * rt + byTheHair);
     assertEquals(vapour.pressure(), ends.vapourPressure(), 1e-6 * ends.vapourPressure());
+  }
+
+  /** Gas alone is the same gas up to saturation and refuses the liquid, saturated or compressed. */
+  @Property(tries = 300)
+  void gasAloneRefusesEveryLiquid(
+      @ForAll("pure") Parts parts,
+      @ForAll @DoubleRange(min = 0.001, max = 0.9995) @Scale(9) double temperatureShare,
+      @ForAll @DoubleRange(min = 1e-5, max = 1) @Scale(9) double densityShare) {
+    Gas gas = CATALOGUE.findGas(parts.gas().id()).orElseThrow();
+    double t = parts.temperature(temperatureShare);
+    PhaseEnds ends = parts.phases().endsAt(t);
+    double thin = ends.vapourDensity() * (1 - 1e-8) * Math.pow(1e-3, densityShare);
+    assertEquals(parts.gas().at(t, thin), gas.at(t, thin));
+    double dense =
+        ends.liquidDensity() + densityShare * (parts.maxDensity() - ends.liquidDensity());
+    assertCondenses(() -> gas.at(t, dense));
+    State liquid;
+    try {
+      liquid = parts.gas().at(t, dense);
+    } catch (OutsideValidity solidOrOutOfRange) {
+      return;
+    }
+    double p = liquid.pressure();
+    assertCondenses(() -> gas.atTemperaturePressure(t, p));
+    assertCondenses(() -> gas.atDensityEnergy(dense, liquid.internalEnergy(), t));
+    assertCondenses(() -> gas.atDensityEntropy(dense, liquid.entropy()));
+    assertCondenses(() -> gas.atPressureEntropy(p, liquid.entropy()));
+    assertCondenses(() -> gas.atPressureEnthalpy(p, liquid.enthalpy()));
   }
 
   /** Air: gas is accepted below the guard and nothing above it, be it dense or liquid. */

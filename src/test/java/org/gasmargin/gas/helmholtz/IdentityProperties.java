@@ -66,7 +66,7 @@ class IdentityProperties {
     double du = slope(x -> gas.at(x, rho).internalEnergy(), t);
     assertEquals(s.cv(), du, BY_DIFFERENCES * s.cv());
     double dp = slope(x -> gas.at(x, rho).pressure(), t);
-    assertEquals(s.dpdT(), dp, BY_DIFFERENCES * (s.dpdT() + rho * rt / t));
+    assertEquals(s.dpdT(), dp, BY_DIFFERENCES * (Math.abs(s.dpdT()) + rho * rt / t));
     double ds = slope(x -> gas.at(x, rho).entropy(), t);
     assertEquals(s.cv() / t, ds, BY_DIFFERENCES * s.cv() / t);
   }
@@ -97,14 +97,16 @@ class IdentityProperties {
     assertEquals(s.dudRho(), du, BY_DIFFERENCES * energyScale);
     // Maxwell: (ds/drho)_T = -(dp/dT)_rho / rho^2
     double ds = slope(x -> gas.at(t, x).entropy(), rho);
-    assertEquals(-s.dpdT() / (rho * rho), ds, BY_DIFFERENCES * s.dpdT() / (rho * rho));
+    double entropyScale = (Math.abs(s.dpdT()) + Gas.MOLAR_GAS_CONSTANT * rho) / (rho * rho);
+    assertEquals(-s.dpdT() / (rho * rho), ds, BY_DIFFERENCES * entropyScale);
   }
 
   @Property(tries = 300)
   void thinGasIsIdeal(@ForAll GasState any) {
     Gas gas = any.gas();
     double t = any.state().temperature();
-    double rho = 1e-4;
+    // Below the density of every saturated vapour in range; that of propane at 85.5 K is 2.4e-7.
+    double rho = 1e-8;
     State thin = gas.at(t, rho);
     double r = thin.dpdT() / rho;
     assertEquals(Gas.MOLAR_GAS_CONSTANT, r, 1e-4 * r);

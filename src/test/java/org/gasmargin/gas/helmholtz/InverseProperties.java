@@ -37,7 +37,7 @@ class InverseProperties {
     double perPressure =
         expected.pressure() / (expected.molarDensity() * expected.dpdRho())
             + expected.temperature()
-                * expected.dpdT()
+                * Math.abs(expected.dpdT())
                 / (expected.molarDensity() * expected.dpdRho());
     assertEquals(
         expected.molarDensity(),
@@ -63,7 +63,17 @@ class InverseProperties {
   @Property(tries = 1000)
   void densityAndPressureGiveTheState(@ForAll GasState any) {
     State s = any.state();
-    assertSame(s, any.gas().atDensityPressure(s.molarDensity(), s.pressure()));
+    State found;
+    try {
+      found = any.gas().atDensityPressure(s.molarDensity(), s.pressure());
+    } catch (OutsideValidity refusal) {
+      // Cold water alone: a second temperature with this density and pressure.
+      assertTrue(refusal.toString().contains("first falls"), refusal.toString());
+      assertEquals("water", any.gas().id());
+      assertTrue(s.temperature() < 282);
+      return;
+    }
+    assertSame(s, found);
   }
 
   @Property(tries = 1000)
@@ -97,7 +107,9 @@ class InverseProperties {
     }
     assertTrue(denser.molarDensity() > s.molarDensity());
     assertTrue(denser.dpdRho() > 0);
-    assertEquals(higher, denser.pressure(), 1e-9 * Math.max(higher, s.temperature() * s.dpdT()));
+    // In a liquid the last digit of density is many digits of pressure.
+    double stiffness = denser.molarDensity() * denser.dpdRho();
+    assertEquals(higher, denser.pressure(), 1e-9 * higher + 1e-13 * stiffness);
   }
 
   @Provide

@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 
 import org.gasmargin.gas.Gas;
 import org.gasmargin.gas.OutsideValidity;
+import org.gasmargin.gas.State;
 import org.gasmargin.gas.catalogue.GasCatalogue;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.function.Executable;
@@ -52,8 +53,8 @@ class RefusalTest {
   @Test
   void condensingAir() {
     assertRefused(
-        "air at 100.000 K would begin to condense: gas is modelled up to 5.50401 bar(a) at this"
-            + " temperature, just below its dew pressure",
+        "air at 100.000 K would begin to condense: only gas is modelled, at this temperature up to"
+            + " 5.50401 bar(a)",
         () -> CATALOGUE.find("air").orElseThrow().atTemperaturePressure(100, 1e6));
   }
 
@@ -81,5 +82,47 @@ class RefusalTest {
         "the correlation of the thermal conductivity of helium begins at 12.0000 K, asked was 10.0000"
             + " K",
         () -> helium.thermalConductivity(helium.atTemperaturePressure(10, 1e5)));
+  }
+
+  @Test
+  void condensingWhereGasAloneIsAskedFor() {
+    Gas carbonDioxide = CATALOGUE.findGas("CO2").orElseThrow();
+    assertRefused(
+        "carbon dioxide at 293.150 K would begin to condense: only gas is modelled, at this"
+            + " temperature up to 57.2905 bar(a)",
+        () -> carbonDioxide.atTemperaturePressure(293.15, 80e5));
+    assertRefused(
+        "carbon dioxide at 293.150 K would begin to condense: only gas is modelled, at this"
+            + " temperature up to 57.2905 bar(a)",
+        () -> carbonDioxide.at(293.15, 18_000));
+  }
+
+  @Test
+  void transportWithoutACorrelation() {
+    Gas neon = CATALOGUE.find("neon").orElseThrow();
+    State state = neon.atTemperaturePressure(300, 1e5);
+    assertRefused(
+        "no correlation of the viscosity of neon is carried, so it is unknown",
+        () -> neon.viscosity(state));
+    assertRefused(
+        "no correlation of the thermal conductivity of neon is carried, so it is unknown",
+        () -> neon.thermalConductivity(state));
+  }
+
+  @Test
+  void coldWaterFromDensityAndPressure() {
+    Gas water = CATALOGUE.find("water").orElseThrow();
+    State cold = water.atTemperaturePressure(275, 1e6);
+    assertRefused(
+        "water at a density of 55530.0 mol/m3: its pressure first falls and then rises as it warms,"
+            + " so that density and pressure do not settle the temperature",
+        () -> water.atDensityPressure(cold.molarDensity(), 1e6));
+  }
+
+  /** The one point at which the terms around the critical point have no derivatives. */
+  @Test
+  void criticalPointItselfIsNoUsableState() {
+    Gas carbonDioxide = CATALOGUE.find("CO2").orElseThrow();
+    assertThrows(OutsideValidity.class, () -> carbonDioxide.at(304.1282, 10_624.9063));
   }
 }
