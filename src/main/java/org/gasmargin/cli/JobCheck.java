@@ -6,6 +6,8 @@ import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
 import java.util.HexFormat;
 import java.util.List;
+import java.util.concurrent.CompletableFuture;
+import java.util.concurrent.CompletionException;
 import org.gasmargin.gas.OutsideValidity;
 import org.gasmargin.gas.catalogue.GasCatalogue;
 import org.gasmargin.job.Job;
@@ -38,9 +40,12 @@ record JobCheck(WorksheetContent content) {
    * @throws InputRefused with a line for everything that the user can put right
    */
   static JobCheck of(Path file) {
-    List<RulePack> packs = rulePacks();
-    Job job = read(file, packs);
+    // Packs take as long to check as the job to simulate; both are done at once.
+    CompletableFuture<List<RulePack>> loading =
+        CompletableFuture.supplyAsync(RulePackLoader::loadBuiltIn);
+    Job job = read(file);
     ProcedureResult result = simulate(file, job);
+    List<RulePack> packs = loaded(loading);
     Judgement judgement =
         Judge.judge(
             new JudgingCase(result, job.limits(), job.judgeOn(), job.rulePacks(), job.units()),
@@ -60,20 +65,21 @@ record JobCheck(WorksheetContent content) {
             ProgramVersion.number()));
   }
 
-  private static List<RulePack> rulePacks() {
+  private static List<RulePack> loaded(CompletableFuture<List<RulePack>> loading) {
     try {
-      return RulePackLoader.loadBuiltIn();
-    } catch (RulePackErrors refused) {
-      throw new InputRefused(refused.issues().stream().map(Issue::toString).toList());
+      return loading.join();
+    } catch (CompletionException failed) {
+      if (failed.getCause() instanceof RulePackErrors refused) {
+        throw new InputRefused(refused.issues().stream().map(Issue::toString).toList());
+      }
+      throw failed;
     }
   }
 
-  private static Job read(Path file, List<RulePack> packs) {
+  private static Job read(Path file) {
     try {
       return new JobReader(
-              new GasCatalogue(),
-              MaterialCatalogue.load(),
-              packs.stream().map(RulePack::name).toList())
+              new GasCatalogue(), MaterialCatalogue.load(), RulePackLoader.builtInNames())
           .read(file);
     } catch (JobErrors errors) {
       throw new InputRefused(errors.issues().stream().map(Issue::toString).toList());

@@ -41,11 +41,15 @@ public final class RulePackLoader {
    */
   public static List<RulePack> loadBuiltIn() {
     List<Source> sources =
-        resource("packs.txt")
-            .lines()
+        builtInNames().stream()
             .map(name -> new Source("rules/" + name + SUFFIX, name, resource(name + SUFFIX)))
             .toList();
     return load(sources, new Issues());
+  }
+
+  /** The names of the packs that came with the program. */
+  public static List<String> builtInNames() {
+    return resource("packs.txt").lines().toList();
   }
 
   /**
