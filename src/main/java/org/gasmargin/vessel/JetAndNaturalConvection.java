@@ -15,6 +15,13 @@ import org.gasmargin.gas.State;
 public final class JetAndNaturalConvection implements FilmLaw {
   private static final double GRAVITY = 9.80665;
   private static final double JET_FACTOR = 0.56;
+
+  /**
+   * Re_d, a tenth of the lowest of the correlation, below which the jet's part falls in proportion:
+   * less than the power law, so less heat is credited, and without its infinite slope at rest.
+   */
+  private static final double WEAK_JET = 1e3;
+
   private static final double JET_EXPONENT = 0.67;
   private static final double NATURAL_FACTOR = 0.104;
   private static final double NATURAL_EXPONENT = 0.352;
@@ -62,12 +69,16 @@ public final class JetAndNaturalConvection implements FilmLaw {
     double difference = state.temperature() - surface;
     double smooth = Math.hypot(difference, ROUNDING);
     double natural = NATURAL_FACTOR * Math.pow(film.rayleighPerKelvin * smooth, NATURAL_EXPONENT);
-    double jet = JET_FACTOR * Math.pow(jetReynolds(film, inflow), JET_EXPONENT);
+    double reynolds = jetReynolds(film, inflow);
+    boolean weak = reynolds < WEAK_JET;
+    double jet = JET_FACTOR * Math.pow(Math.max(reynolds, WEAK_JET), JET_EXPONENT);
+    jet *= weak ? reynolds / WEAK_JET : 1;
     double scale = factor * film.conductivity / length;
     double coefficient = scale * (jet + natural);
     double steepening = NATURAL_EXPONENT * difference * difference / (smooth * smooth);
     double byGas = scale * (jet + natural * (1 + steepening));
-    double byInflow = inflow > 0 ? scale * jet * JET_EXPONENT * difference / inflow : 0;
+    double jetSlope = weak ? 1 : JET_EXPONENT;
+    double byInflow = inflow > 0 ? scale * jet * jetSlope * difference / inflow : 0;
     return new FilmFlux(coefficient * difference, byGas, -byGas, byInflow);
   }
 

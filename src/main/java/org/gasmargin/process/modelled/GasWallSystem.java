@@ -32,6 +32,9 @@ final class GasWallSystem implements StageSystem {
   /** Iterations that the temperature of a surface may need. */
   static final int MOST_ITERATIONS = 60;
 
+  /** Iterations after which the bracket is halved instead. */
+  private static final int MOST_NEWTON_STEPS = 15;
+
   /** Relative precision of the temperature of a surface. */
   static final double SURFACE_PRECISION = 1e-11;
 
@@ -240,22 +243,42 @@ final class GasWallSystem implements StageSystem {
     wallSide.balanceOuterSurface(z);
   }
 
-  /** Finds the inner surface temperature at which the film gives what the wall takes. */
+  /**
+   * Finds the inner surface temperature at which the film gives what the wall takes: between the
+   * first cell, where the wall takes nothing, and the gas, where the film gives nothing. Newton
+   * steps, halving where they leave that bracket or do not shrink it (a jet that has just begun to
+   * flow makes the film steep).
+   */
   private void balanceInnerSurface(double[] z) {
     State state = gas(z);
     double area = wall.innerArea();
     double inflowByHeat = side.gas().molarMass() * side.rateByHeat(state, z[EXTENT]);
+    double cellSide = z[FIRST_CELL];
+    double gasSide = state.temperature();
     for (int iteration = 0; iteration < MOST_ITERATIONS; iteration++) {
       WallConduction.Link entering = wallSide.entering(z);
       double inflow = side.fills() ? side.inflow(side.rate(state, z[EXTENT], entering.heat())) : 0;
       FilmFlux flux = film.flux(state, z[INNER_SURFACE], inflow);
       double excess = area * flux.flux() - entering.heat();
+      if (excess == 0) {
+        return;
+      }
+      if (excess * (gasSide - cellSide) > 0) {
+        cellSide = z[INNER_SURFACE];
+      } else {
+        gasSide = z[INNER_SURFACE];
+      }
       double slope =
           area * (flux.bySurface() + flux.byInflow() * inflowByHeat * entering.byInner())
               - entering.byInner();
-      double step = excess / slope;
-      z[INNER_SURFACE] -= step;
-      if (Math.abs(step) <= SURFACE_PRECISION * z[INNER_SURFACE]) {
+      double next = z[INNER_SURFACE] - excess / slope;
+      boolean inside = (next - cellSide) * (next - gasSide) < 0;
+      if (!inside || iteration > MOST_NEWTON_STEPS) {
+        next = 0.5 * (cellSide + gasSide);
+      }
+      double step = next - z[INNER_SURFACE];
+      z[INNER_SURFACE] = next;
+      if (Math.abs(step) <= SURFACE_PRECISION * next) {
         return;
       }
     }

@@ -1,5 +1,6 @@
 package org.gasmargin.process.modelled;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.gasmargin.process.Closure;
@@ -27,6 +28,13 @@ public record ModelledStep(
   public ModelledStep {
     events = List.copyOf(events);
     notes = List.copyOf(notes);
+  }
+
+  /** The same with one more note, if there is one. */
+  ModelledStep withNote(Optional<String> note) {
+    List<String> more = new ArrayList<>(notes);
+    note.ifPresent(more::add);
+    return new ModelledStep(outcome, end, closure, events, more);
   }
 
   /** A step without a path. */

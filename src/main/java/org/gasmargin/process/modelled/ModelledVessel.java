@@ -117,34 +117,89 @@ public final class ModelledVessel {
     if (plan instanceof StepPlan.Over over) {
       return standstill(start, wall, over.note());
     }
+    if (plan instanceof StepPlan.Ramp ramp) {
+      List<Phase> phases = new OneWayRamp(ramp, phaseRunner(wall)).run(vessel.gas(), start);
+      FilmLaw film = film(ramp.flowing().from(start, ramp.ramp()).jetBore());
+      ModelledStep step = result(new JoinedPhases(phases), film, ramp.direction() > 0);
+      double endPressure = phases.get(phases.size() - 1).recorder().last().pressure();
+      return step.withNote(OneWayRamp.note(ramp, endPressure));
+    }
     StepPlan.Integration integration = (StepPlan.Integration) plan;
-    FilmLaw film = film(integration.jetBore());
-    GasWallSystem system = system(integration, film, wall);
-    double[] z =
-        system.unknowns(
-            integration.startExtent(),
-            start.temperature(),
-            start.wall().stream().mapToDouble(Double::doubleValue).toArray());
-    Watches watches = new Watches(system, integration);
+    Phase phase = phase(integration, start, 0, Optional.empty(), wall);
+    return result(
+        new JoinedPhases(List.of(phase)),
+        film(integration.jetBore()),
+        integration.carried() instanceof Carried.Supply);
+  }
+
+  private OneWayRamp.Runner phaseRunner(WallSide wall) {
+    return new OneWayRamp.Runner() {
+      @Override
+      public double startRate(StepPlan.Integration integration, VesselCondition start) {
+        GasWallSystem system = system(integration, film(integration.jetBore()), wall);
+        double[] z = unknowns(system, integration, start);
+        system.makeConsistent(z);
+        double[] rates = new double[z.length];
+        system.rates(0, z, rates);
+        return rates[GasWallSystem.EXTENT];
+      }
+
+      @Override
+      public Phase run(
+          StepPlan.Integration integration,
+          VesselCondition start,
+          double begin,
+          OneWayRamp.Turn turn) {
+        return phase(integration, start, begin, Optional.of(turn), wall);
+      }
+    };
+  }
+
+  private static double[] unknowns(
+      GasWallSystem system, StepPlan.Integration integration, VesselCondition start) {
+    return system.unknowns(
+        integration.startExtent(),
+        start.temperature(),
+        start.wall().stream().mapToDouble(Double::doubleValue).toArray());
+  }
+
+  private Phase phase(
+      StepPlan.Integration integration,
+      VesselCondition start,
+      double begin,
+      Optional<OneWayRamp.Turn> turn,
+      WallSide wall) {
+    GasWallSystem system = system(integration, film(integration.jetBore()), wall);
+    Watches watches = new Watches(system, integration, turn);
     Trajectory trajectory =
         new ImplicitIntegrator(tolerance)
-            .integrate(system, z, integration.duration(), watches.list());
+            .integrate(
+                system,
+                unknowns(system, integration, start),
+                integration.duration(),
+                watches.list());
     watches.check(trajectory);
     PathRecorder recorder = new PathRecorder(system);
     recorder.record(trajectory, watches.reached(trajectory));
+    return new Phase(
+        begin,
+        system,
+        trajectory,
+        recorder,
+        watches.events(trajectory, begin),
+        watches.turned(trajectory));
+  }
+
+  private ModelledStep result(JoinedPhases phases, FilmLaw film, boolean fills) {
     List<String> notes =
         film instanceof JetAndNaturalConvection correlation
-            ? FilmNotes.of(
-                correlation,
-                recorder.samples(),
-                integration.carried() instanceof Carried.Supply,
-                vessel.gas().molarMass())
+            ? FilmNotes.of(correlation, phases.samples(), fills, vessel.gas().molarMass())
             : List.of();
     return new ModelledStep(
-        new PathOutcome.Computed(recorder.path()),
-        recorder.end(),
-        Optional.of(new Balance(system).closure(trajectory)),
-        watches.events(trajectory),
+        new PathOutcome.Computed(phases.path()),
+        phases.last().recorder().end(),
+        Optional.of(phases.closure()),
+        phases.events(),
         notes);
   }
 
@@ -152,11 +207,7 @@ public final class ModelledVessel {
   private ModelledStep standstill(VesselCondition start, WallSide wall, String note) {
     StepPlan.Integration closed = StepPlanner.closed(start, 0);
     GasWallSystem system = system(closed, film(OptionalDouble.empty()), wall);
-    double[] z =
-        system.unknowns(
-            start.amount(),
-            start.temperature(),
-            start.wall().stream().mapToDouble(Double::doubleValue).toArray());
+    double[] z = unknowns(system, closed, start);
     system.makeConsistent(z);
     PathRecorder recorder = new PathRecorder(system);
     recorder.recordInstant(z);

@@ -34,6 +34,22 @@ sealed interface StepPlan {
       OptionalDouble jetBore)
       implements StepPlan {}
 
+  /**
+   * A pressure that follows a ramp through a valve that lets gas pass one way only.
+   *
+   * @param ramp from the pressure at the start to the target
+   * @param direction 1 in, -1 out
+   * @param flowing the integration while gas flows
+   */
+  record Ramp(Opening.Ramp ramp, int direction, Flowing flowing) implements StepPlan {}
+
+  /** Plans the flowing part of a ramp. */
+  @FunctionalInterface
+  interface Flowing {
+    /** The integration from a condition along the rest of a ramp. */
+    Integration from(VesselCondition start, Opening.Ramp rest);
+  }
+
   /** Tells whether the flow out of a state is choked. */
   @FunctionalInterface
   interface Choking {

@@ -86,7 +86,7 @@ final class StepPlanner {
         };
     Stream stream = new Stream(1, carried, guard, fill.inletDiameter());
     if (fill.drive() instanceof Drive.PressureRamp ramp) {
-      return ramp(ramp, start, state, stream);
+      return ramp(ramp, state, stream);
     }
     return fill.drive() instanceof Drive.MassFlow flow
         ? constantFlow(flow, start, stream)
@@ -111,15 +111,14 @@ final class StepPlanner {
         };
     Stream stream = new Stream(-1, new Carried.Own(), guard, OptionalDouble.empty());
     if (vent.drive() instanceof Drive.PressureRamp ramp) {
-      return ramp(ramp, start, state, stream);
+      return ramp(ramp, state, stream);
     }
     return vent.drive() instanceof Drive.MassFlow flow
         ? constantFlow(flow, start, stream)
         : orifice((Drive.Orifice) vent.drive(), start, state, stream);
   }
 
-  private StepPlan ramp(
-      Drive.PressureRamp ramp, VesselCondition start, State state, Stream stream) {
+  private StepPlan ramp(Drive.PressureRamp ramp, State state, Stream stream) {
     double until = inputs.value(UncertainInput.UNTIL, ramp.until());
     if ((until - state.pressure()) * stream.direction() <= 0) {
       return over(until, state);
@@ -127,14 +126,10 @@ final class StepPlanner {
     if (!(ramp.within() > 0)) {
       return suddenly();
     }
-    Stream forward =
-        oneWay(
-            stream,
-            BACKFLOW * start.amount() / ramp.within(),
-            "heat exchange alone moves the pressure faster than the ramp: gas would have to flow"
-                + " backwards");
-    Opening opening = new Opening.Ramp(state.pressure(), until, ramp.within());
-    return rigid(start, forward, opening, ramp.within());
+    return new StepPlan.Ramp(
+        new Opening.Ramp(state.pressure(), until, ramp.within()),
+        stream.direction(),
+        (condition, rest) -> rigid(condition, stream, rest, rest.duration()));
   }
 
   /**

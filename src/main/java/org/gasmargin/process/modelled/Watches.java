@@ -3,6 +3,7 @@ package org.gasmargin.process.modelled;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import org.gasmargin.gas.OutsideValidity;
 import org.gasmargin.process.Event;
@@ -16,9 +17,16 @@ final class Watches {
   private final List<Watch> watches = new ArrayList<>();
   private final List<String> words = new ArrayList<>();
   private final StepPlan.Integration plan;
+  private final boolean turnWatched;
 
-  Watches(GasWallSystem system, StepPlan.Integration plan) {
+  Watches(GasWallSystem system, StepPlan.Integration plan, Optional<OneWayRamp.Turn> turn) {
     this.plan = plan;
+    turn.ifPresent(
+        watched -> {
+          watches.add(watched.watch().of(system));
+          words.add(watched.words());
+        });
+    this.turnWatched = turn.isPresent();
     plan.endPressure()
         .ifPresent(
             end -> {
@@ -39,11 +47,20 @@ final class Watches {
     return List.copyOf(watches);
   }
 
-  /** The events in words. */
-  List<Event> events(Trajectory trajectory) {
+  /**
+   * The events in words.
+   *
+   * @param begin time since the start of the step at which the integration began, s
+   */
+  List<Event> events(Trajectory trajectory, double begin) {
     return trajectory.sightings().stream()
-        .map(s -> new Event(s.time(), PathKind.MODELLED, words.get(s.watch())))
+        .map(s -> new Event(begin + s.time(), PathKind.MODELLED, words.get(s.watch())))
         .toList();
+  }
+
+  /** Whether the turn that was watched for ended the integration. */
+  boolean turned(Trajectory trajectory) {
+    return turnWatched && trajectory.sightings().stream().anyMatch(s -> s.watch() == 0);
   }
 
   /** The pressure at which the step ended, if an end pressure was reached. */

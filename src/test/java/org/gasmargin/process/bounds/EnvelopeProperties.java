@@ -30,7 +30,7 @@ class EnvelopeProperties {
   private static final double BAR = 1e5;
   private static final int STRETCHES = 400;
 
-  @Property(tries = 150)
+  @Property(tries = 150, seed = "20261201")
   void randomHeatExchangeOfAnIdealGasStaysInside(@ForAll @LongRange(min = 0) long seed) {
     Gas gas =
         seed % 2 == 0
@@ -39,7 +39,7 @@ class EnvelopeProperties {
     assertStaysInside(gas, new Random(seed), STRETCHES);
   }
 
-  @Property(tries = 30)
+  @Property(tries = 30, seed = "20261201")
   void randomHeatExchangeOfARealGasStaysInside(@ForAll @LongRange(min = 0) long seed) {
     List<String> gases = List.of("nitrogen", "hydrogen", "methane", "helium", "air");
     Random random = new Random(seed);
