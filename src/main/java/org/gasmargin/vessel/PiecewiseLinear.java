@@ -49,6 +49,24 @@ final class PiecewiseLinear {
     return integrals[i] + (values[i] + 0.5 * slope(i) * step) * step;
   }
 
+  /**
+   * The integral over a step from a temperature, precise to the last digit of a small step.
+   *
+   * @param from K
+   * @param step K, of either sign
+   */
+  double integralOver(double from, double step) {
+    boolean same =
+        segment(from) == segment(from + step) && (segment(from) >= 0 || sameSide(from, step));
+    return same
+        ? (at(from) + 0.5 * slopeAt(from) * step) * step
+        : integralTo(from + step) - integralTo(from);
+  }
+
+  private boolean sameSide(double from, double step) {
+    return values.length == 1 || (from < temperatures[0]) == (from + step < temperatures[0]);
+  }
+
   private double end(double temperature) {
     return temperature < temperatures[0] ? values[0] : values[values.length - 1];
   }

@@ -89,38 +89,34 @@ public final class WallConduction {
     return mass[cell] * heatCapacity[cell].at(temperature);
   }
 
-  /** Heat content of a cell, J, above a datum of its own that never changes. */
-  public double heatContent(int cell, double temperature) {
-    return mass[cell] * heatCapacity[cell].integralTo(temperature);
+  /**
+   * Heat content of a cell above a datum, J.
+   *
+   * @param datum K
+   * @param offset of the cell's temperature from the datum, K
+   */
+  public double heatContent(int cell, double datum, double offset) {
+    return mass[cell] * heatCapacity[cell].integralOver(datum, offset);
   }
 
   /** Heat content of the wall above a uniform temperature, J. */
   public double heatContentAbove(double reference, double[] temperatures) {
     double sum = 0;
     for (int i = 0; i < cells; i++) {
-      sum += heatContent(i, temperatures[i]) - heatContent(i, reference);
+      sum += heatContent(i, reference, temperatures[i] - reference);
     }
     return sum;
   }
 
   /** The uniform temperature with the same heat content, K. */
   public double meanTemperature(double[] temperatures) {
-    double weighted = 0;
-    double weight = 0;
-    for (int i = 0; i < cells; i++) {
-      double capacity = capacity(i, temperatures[i]);
-      weighted += capacity * temperatures[i];
-      weight += capacity;
-    }
-    double mean = weighted / weight;
+    double mean = Arrays.stream(temperatures).average().orElseThrow();
     for (int iteration = 0; iteration < 50; iteration++) {
-      double excess = 0;
       double capacity = 0;
       for (int i = 0; i < cells; i++) {
-        excess += heatContent(i, temperatures[i]) - heatContent(i, mean);
         capacity += capacity(i, mean);
       }
-      double step = excess / capacity;
+      double step = heatContentAbove(mean, temperatures) / capacity;
       mean += step;
       if (Math.abs(step) <= 1e-12 * mean) {
         break;
@@ -140,21 +136,23 @@ public final class WallConduction {
   }
 
   /**
-   * Heat that passes from the middle of a cell to the middle of the next.
+   * Heat that passes from the middle of a cell to the middle of the next. Temperatures are given as
+   * offsets from a datum, whose difference keeps more digits.
    *
    * @param cell the inner one of the two
-   * @param inner its temperature, K
-   * @param outer temperature of the next, K
+   * @param datum K
+   * @param inner offset of its temperature, K
+   * @param outer offset of the temperature of the next, K
    */
-  public Link link(int cell, double inner, double outer) {
-    double kInner = conductivity[cell].at(inner);
-    double kOuter = conductivity[cell + 1].at(outer);
-    double resistanceInner = outerHalf[cell] / kInner;
-    double resistanceOuter = innerHalf[cell + 1] / kOuter;
+  public Link link(int cell, double datum, double inner, double outer) {
+    PiecewiseLinear kInner = conductivity[cell];
+    PiecewiseLinear kOuter = conductivity[cell + 1];
+    double resistanceInner = outerHalf[cell] / kInner.at(datum + inner);
+    double resistanceOuter = innerHalf[cell + 1] / kOuter.at(datum + outer);
     double conductance = 1 / (resistanceInner + resistanceOuter);
     double heat = conductance * (inner - outer);
-    double bendInner = resistanceInner * conductivity[cell].slopeAt(inner) / kInner;
-    double bendOuter = resistanceOuter * conductivity[cell + 1].slopeAt(outer) / kOuter;
+    double bendInner = resistanceInner * kInner.slopeAt(datum + inner) / kInner.at(datum + inner);
+    double bendOuter = resistanceOuter * kOuter.slopeAt(datum + outer) / kOuter.at(datum + outer);
     return new Link(
         heat, conductance * (1 + heat * bendInner), conductance * (-1 + heat * bendOuter));
   }

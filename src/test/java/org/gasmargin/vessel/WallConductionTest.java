@@ -42,7 +42,7 @@ class WallConductionTest {
   private static double resistance(WallConduction wall) {
     double sum = 1 / wall.innerSurface(293.15).value() + 1 / wall.outerSurface(293.15).value();
     for (int i = 0; i + 1 < wall.cells(); i++) {
-      sum += 1 / wall.link(i, 293.15, 293.15).byInner();
+      sum += 1 / wall.link(i, 293.15, 0, 0).byInner();
     }
     return sum;
   }
@@ -137,13 +137,12 @@ class WallConductionTest {
     WallConduction wall =
         new WallConduction(wall(new WallShape.Plate(1), bent, LINER), THICKNESSES);
     double nudge = 1e-3;
-    WallConduction.Link link = wall.link(3, 300, 250);
+    WallConduction.Link link = wall.link(3, 250, 50, 0);
     double byInner =
-        (wall.link(3, 300 + nudge, 250).heat() - wall.link(3, 300 - nudge, 250).heat())
+        (wall.link(3, 250, 50 + nudge, 0).heat() - wall.link(3, 250, 50 - nudge, 0).heat())
             / (2 * nudge);
     double byOuter =
-        (wall.link(3, 300, 250 + nudge).heat() - wall.link(3, 300, 250 - nudge).heat())
-            / (2 * nudge);
+        (wall.link(3, 250, 50, nudge).heat() - wall.link(3, 250, 50, -nudge).heat()) / (2 * nudge);
     assertEquals(byInner, link.byInner(), 1e-6 * Math.abs(byInner));
     assertEquals(byOuter, link.byOuter(), 1e-6 * Math.abs(byOuter));
   }

@@ -2,16 +2,15 @@ package org.gasmargin.process.modelled;
 
 import org.gasmargin.gas.State;
 import org.gasmargin.process.Closure;
-import org.gasmargin.vessel.WallConduction;
 
 /**
  * The balances of a step, from the states of gas and wall at its two ends and what flowed between.
  *
- * <p>Energy: rise of the gas less what came with the flow or as work, plus the heat it gave up; and
- * rise of the wall less the heat it took in, plus the heat it lost to the surroundings. Both
- * remainders add up in magnitude. They are measured against the largest of these terms and of the
- * thermal energy n cv T of the gas at either end, which is there so that a step in which nothing
- * happens has a measure.
+ * <p>Energy: rise of the gas and of the wall, less what came with the flow or as work, plus the
+ * heat to the surroundings; where the gas touches only part of the wall, the heat that its balance
+ * and that of the wall do not share. Measured against the largest of these terms and of the thermal
+ * energy n cv T of the gas at either end, which is there so that a step in which nothing happens
+ * has a measure.
  */
 final class Balance {
   private final GasWallSystem system;
@@ -26,17 +25,12 @@ final class Balance {
     double[] after = trajectory.endUnknowns();
     double[] flows = trajectory.flows();
     double gasRise = energy(after) - energy(before);
-    WallConduction wall = system.wall();
-    double wallRise = 0;
-    for (int i = 0; i < wall.cells(); i++) {
-      int row = GasWallSystem.FIRST_CELL + i;
-      wallRise += wall.heatContent(i, after[row]) - wall.heatContent(i, before[row]);
-    }
+    double wallRise = system.wallRise(before, after);
     double carried = flows[GasWallSystem.FLOW_ENERGY];
     double gasHeat = flows[GasWallSystem.FLOW_GAS_HEAT];
     double wallHeat = flows[GasWallSystem.FLOW_WALL_HEAT];
     double lost = flows[GasWallSystem.FLOW_LOST_HEAT];
-    double residual = Math.abs(gasRise - carried + gasHeat) + Math.abs(wallRise - wallHeat + lost);
+    double residual = Math.abs((gasRise - carried + gasHeat) + (wallRise - wallHeat + lost));
     double measure =
         largest(
             gasRise, wallRise, carried, gasHeat, lost, thermalEnergy(before), thermalEnergy(after));

@@ -12,7 +12,7 @@ final class BandMatrix {
   static final int BELOW = 2;
 
   /** Diagonals above the main one. */
-  static final int ABOVE = 1;
+  static final int ABOVE = 2;
 
   private static final int REACH = BELOW + ABOVE;
 

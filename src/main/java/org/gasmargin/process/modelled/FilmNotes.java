@@ -33,7 +33,7 @@ final class FilmNotes {
     Range reynolds = new Range();
     Range rayleigh = new Range();
     for (PathRecorder.Sample sample : samples) {
-      double surface = sample.z()[GasWallSystem.INNER_SURFACE];
+      double surface = sample.innerSurface();
       double inflow = filling ? Math.max(0, sample.rate() * molarMass) : 0;
       Numbers numbers = film.numbers(sample.state(), surface, inflow);
       if (numbers.jetReynolds() > 0) {

@@ -1,6 +1,5 @@
 package org.gasmargin.process.modelled;
 
-import java.util.Arrays;
 import org.gasmargin.gas.OutsideValidity;
 import org.gasmargin.gas.State;
 import org.gasmargin.vessel.FilmFlux;
@@ -11,10 +10,10 @@ import org.gasmargin.vessel.WallConduction;
  * Well-mixed gas and a conducting wall as one system of equations.
  *
  * <p>Unknowns: the extent of the gas (amount, or volume of a trapped amount), its temperature, the
- * temperature of the inner surface, of each wall cell from the inside, and of the outer surface.
- * Conserved: the extent, the internal energy of the gas, the heat content of each cell. The
- * surfaces hold no heat. Flows: extent (mol or m3), energy carried with it (J), heat out of the
- * gas, heat into the wall, heat to the surroundings (J).
+ * temperature of the inner surface, of each wall cell from the inside, and of the outer surface,
+ * these as offsets from a datum. Conserved: the extent, the internal energy of the gas, the heat
+ * content of each cell. The surfaces hold no heat. Flows: extent (mol or m3), energy carried with
+ * it (J), heat out of the gas, heat into the wall, heat to the surroundings (J).
  */
 final class GasWallSystem implements StageSystem {
   static final int EXTENT = 0;
@@ -68,7 +67,11 @@ final class GasWallSystem implements StageSystem {
     this.outerSurface = wallSide.outerSurface();
   }
 
-  /** Unknowns from the state of gas and wall, with surfaces still to be made consistent. */
+  /**
+   * Unknowns from the state of gas and wall, with surfaces still to be made consistent.
+   *
+   * @param cells temperatures of the wall cells, K
+   */
   double[] unknowns(double extent, double temperature, double[] cells) {
     if (cells.length != wall.cells()) {
       throw new IllegalArgumentException("the condition belongs to another wall");
@@ -76,20 +79,43 @@ final class GasWallSystem implements StageSystem {
     double[] z = new double[size()];
     z[EXTENT] = extent;
     z[TEMPERATURE] = temperature;
-    System.arraycopy(cells, 0, z, FIRST_CELL, cells.length);
+    for (int i = 0; i < cells.length; i++) {
+      z[FIRST_CELL + i] = cells[i] - wallSide.datum();
+    }
     z[INNER_SURFACE] = z[FIRST_CELL];
     z[outerSurface] = z[outerSurface - 1];
     return z;
   }
 
-  /** Temperatures of the wall cells. */
+  /** Temperatures of the wall cells, K. */
   double[] cells(double[] z) {
-    return Arrays.copyOfRange(z, FIRST_CELL, outerSurface);
+    double[] cells = new double[wall.cells()];
+    for (int i = 0; i < cells.length; i++) {
+      cells[i] = wallSide.datum() + z[FIRST_CELL + i];
+    }
+    return cells;
+  }
+
+  /** Temperature of the inner surface, K. */
+  double innerSurface(double[] z) {
+    return wallSide.datum() + z[INNER_SURFACE];
   }
 
   /** Temperature of the outer surface, K. */
   double outerSurface(double[] z) {
-    return z[outerSurface];
+    return wallSide.datum() + z[outerSurface];
+  }
+
+  /** Rise of the heat content of the wall between two states, J. */
+  double wallRise(double[] before, double[] after) {
+    double sum = 0;
+    for (int i = 0; i < wall.cells(); i++) {
+      int row = FIRST_CELL + i;
+      sum +=
+          wall.heatContent(i, wallSide.datum(), after[row])
+              - wall.heatContent(i, wallSide.datum(), before[row]);
+    }
+    return sum;
   }
 
   /** State of the gas. */
@@ -119,7 +145,7 @@ final class GasWallSystem implements StageSystem {
 
   @Override
   public double magnitude(int unknown, double[] z) {
-    return Math.abs(z[unknown]);
+    return unknown <= TEMPERATURE ? Math.abs(z[unknown]) : wallSide.datum();
   }
 
   @Override
@@ -149,16 +175,11 @@ final class GasWallSystem implements StageSystem {
     double inflow = side.inflow(side.stage(time, state, extent, change, weight, residual, m));
     boolean free = side.onRamp() && inflow > 0;
     double inflowByExtent = free ? side.gas().molarMass() / weight : 0;
-    FilmFlux flux = film.flux(state, z[INNER_SURFACE], inflow);
-    stageEnergy(state, extent, change, inflowByExtent, flux, weight, m);
-    double area = wall.innerArea();
-    residual[TEMPERATURE] =
-        side.energy(state, extent)
-            - known[TEMPERATURE]
-            - side.carried().energy(state) * change
-            + weight * side.content().contact(extent) * area * flux.flux();
-
     WallConduction.Link entering = wallSide.entering(z);
+    stageEnergy(state, extent, known, weight, entering, residual, m);
+
+    FilmFlux flux = film.flux(state, innerSurface(z), inflow);
+    double area = wall.innerArea();
     residual[INNER_SURFACE] = area * flux.flux() - entering.heat();
     m.set(INNER_SURFACE, EXTENT, area * flux.byInflow() * inflowByExtent);
     m.set(INNER_SURFACE, TEMPERATURE, area * flux.byGas());
@@ -167,34 +188,39 @@ final class GasWallSystem implements StageSystem {
     wallSide.stage(z, known, weight, residual, m);
   }
 
-  /** Derivatives of the energy row. */
+  /**
+   * Row of the energy: what the gas loses to the wall is the very number that the wall takes in.
+   */
   private void stageEnergy(
       State state,
       double extent,
-      double change,
-      double inflowByExtent,
-      FilmFlux flux,
+      double[] known,
       double weight,
+      WallConduction.Link entering,
+      double[] residual,
       BandMatrix m) {
     Content content = side.content();
     Carried carried = side.carried();
-    double contact = weight * content.contact(extent) * wall.innerArea();
-    double lessContact = weight * content.contactSlope(extent) * wall.innerArea();
+    double change = extent - known[EXTENT];
+    double contact = weight * content.contact(extent);
+    residual[TEMPERATURE] =
+        side.energy(state, extent)
+            - known[TEMPERATURE]
+            - carried.energy(state) * change
+            + contact * entering.heat();
     m.set(
         TEMPERATURE,
         EXTENT,
         side.energyByExtent(state, extent)
             - carried.energy(state)
             - carried.byDensity(state) * content.densitySlope(extent) * change
-            + contact * flux.byInflow() * inflowByExtent
-            + lessContact * flux.flux());
+            + weight * content.contactSlope(extent) * entering.heat());
     m.set(
         TEMPERATURE,
         TEMPERATURE,
-        side.heatCapacity(state, extent)
-            - carried.byTemperature(state) * change
-            + contact * flux.byGas());
-    m.set(TEMPERATURE, INNER_SURFACE, contact * flux.bySurface());
+        side.heatCapacity(state, extent) - carried.byTemperature(state) * change);
+    m.set(TEMPERATURE, INNER_SURFACE, contact * entering.byInner());
+    m.set(TEMPERATURE, FIRST_CELL, contact * entering.byOuter());
   }
 
   @Override
@@ -254,11 +280,11 @@ final class GasWallSystem implements StageSystem {
     double area = wall.innerArea();
     double inflowByHeat = side.gas().molarMass() * side.rateByHeat(state, z[EXTENT]);
     double cellSide = z[FIRST_CELL];
-    double gasSide = state.temperature();
+    double gasSide = state.temperature() - wallSide.datum();
     for (int iteration = 0; iteration < MOST_ITERATIONS; iteration++) {
       WallConduction.Link entering = wallSide.entering(z);
       double inflow = side.fills() ? side.inflow(side.rate(state, z[EXTENT], entering.heat())) : 0;
-      FilmFlux flux = film.flux(state, z[INNER_SURFACE], inflow);
+      FilmFlux flux = film.flux(state, innerSurface(z), inflow);
       double excess = area * flux.flux() - entering.heat();
       if (excess == 0) {
         return;
@@ -278,7 +304,7 @@ final class GasWallSystem implements StageSystem {
       }
       double step = next - z[INNER_SURFACE];
       z[INNER_SURFACE] = next;
-      if (Math.abs(step) <= SURFACE_PRECISION * next) {
+      if (Math.abs(step) <= SURFACE_PRECISION * wallSide.datum()) {
         return;
       }
     }

@@ -61,6 +61,7 @@ public final class ModelledVessel {
     WallConduction conduction = new WallConduction(wall, thicknesses(wall), refinement);
     double position = inputs.position(UncertainInput.FILM_OUTSIDE);
     return new WallSide(
+        ambient,
         conduction,
         new OutsideExchange(wall, conduction.thickness(), ambient, atmosphere, position));
   }
@@ -104,7 +105,8 @@ public final class ModelledVessel {
           new PathOutcome.Absent("no wall was given, so heat exchange cannot be modelled"));
     }
     try {
-      return run(planner.plan(step, start), start, wallSide.get());
+      WallSide wall = wallSide.get().withDatum(start.wall().get(0));
+      return run(planner.plan(step, start), start, wall);
     } catch (OutsideValidity refused) {
       return ModelledStep.without(new PathOutcome.Failed(String.valueOf(refused.getMessage())));
     }

@@ -28,10 +28,12 @@ final class PathRecorder {
    * @param z unknowns
    * @param state of the gas
    * @param pressure Pa absolute: that of the state, or the one that is prescribed
+   * @param innerSurface temperature of the inner surface, K
    * @param rate of the extent
    */
   @SuppressWarnings("ArrayRecordComponent") // never compared, never handed out of the package
-  record Sample(double time, double[] z, State state, double pressure, double rate) {}
+  record Sample(
+      double time, double[] z, State state, double pressure, double innerSurface, double rate) {}
 
   /** A recorder of solutions of a system. */
   PathRecorder(GasWallSystem system) {
@@ -69,7 +71,9 @@ final class PathRecorder {
     }
     Sample last = stepEnds.remove(stepEnds.size() - 1);
     double lastPressure = endPressure.orElse(last.pressure());
-    samples.add(new Sample(last.time(), last.z(), last.state(), lastPressure, last.rate()));
+    samples.add(
+        new Sample(
+            last.time(), last.z(), last.state(), lastPressure, last.innerSurface(), last.rate()));
   }
 
   /** Records a single instant. */
@@ -99,7 +103,7 @@ final class PathRecorder {
     double coldestWall = Double.POSITIVE_INFINITY;
     for (Sample sample : all) {
       double temperature = sample.state().temperature();
-      double inner = sample.z()[GasWallSystem.INNER_SURFACE];
+      double inner = sample.innerSurface();
       double outer = system.outerSurface(sample.z());
       hottest = Math.max(hottest, temperature);
       coldest = Math.min(coldest, temperature);
@@ -128,7 +132,7 @@ final class PathRecorder {
         z[GasWallSystem.TEMPERATURE],
         system.side().content().amount(z[GasWallSystem.EXTENT]) * molarMass,
         rigid ? sample.rate() * molarMass : 0,
-        OptionalDouble.of(z[GasWallSystem.INNER_SURFACE]),
+        OptionalDouble.of(sample.innerSurface()),
         OptionalDouble.of(system.wall().meanTemperature(system.cells(z))));
   }
 
@@ -155,6 +159,7 @@ final class PathRecorder {
         system.side().opening() instanceof Opening.Ramp ramp
             ? ramp.pressure(time)
             : state.pressure();
-    return new Sample(time, z, state, pressure, rates[GasWallSystem.EXTENT]);
+    return new Sample(
+        time, z, state, pressure, system.innerSurface(z), rates[GasWallSystem.EXTENT]);
   }
 }

@@ -23,7 +23,7 @@ class BandMatrixTest {
       double[] right = new double[size];
       for (int i = 0; i < size; i++) {
         right[i] = random.nextGaussian();
-        for (int j = Math.max(0, i - 2); j <= Math.min(size - 1, i + 1); j++) {
+        for (int j = Math.max(0, i - 2); j <= Math.min(size - 1, i + 2); j++) {
           double entry = i == j ? 0.01 * random.nextGaussian() : random.nextGaussian();
           band.set(i, j, entry);
           dense.setEntry(i, j, entry);
@@ -53,6 +53,6 @@ class BandMatrixTest {
 
   @Test
   void entryOutsideTheBandIsRefused() {
-    assertThrows(IllegalArgumentException.class, () -> new BandMatrix(5).set(0, 2, 1));
+    assertThrows(IllegalArgumentException.class, () -> new BandMatrix(5).set(0, 3, 1));
   }
 }

@@ -37,7 +37,7 @@ class ConvergenceTest {
         new GasWallSystem(
             new GasSide(GAS, new Content.Rigid(0.05), carried, opening),
             new FilmLaw.Constant(200),
-            new WallSide(wall, new OutsideExchange(PLASTIC, 0.025, 300, 101325, 0)),
+            new WallSide(300, wall, new OutsideExchange(PLASTIC, 0.025, 300, 101325, 0)),
             StepPlan.NO_GUARD);
     double amount = GAS.atTemperaturePressure(300, 1e6).molarDensity() * 0.05;
     double[] cells = new double[wall.cells()];
@@ -114,7 +114,7 @@ class ConvergenceTest {
         new GasWallSystem(
             new GasSide(GAS, new Content.Rigid(0.05), own, new Opening.Constant(-0.5)),
             new FilmLaw.Constant(200),
-            new WallSide(wall, new OutsideExchange(PLASTIC, 0.025, 300, 101325, 0)),
+            new WallSide(300, wall, new OutsideExchange(PLASTIC, 0.025, 300, 101325, 0)),
             StepPlan.NO_GUARD);
     double[] cells = new double[wall.cells()];
     Arrays.fill(cells, 300);
