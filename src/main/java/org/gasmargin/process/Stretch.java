@@ -8,6 +8,12 @@ package org.gasmargin.process;
  * @param startTemperature K
  * @param endPressure Pa absolute
  * @param endTemperature K
+ * @param settling whether the gas takes on the temperature of its surroundings at constant volume;
+ *     otherwise no heat passes
  */
 public record Stretch(
-    double startPressure, double startTemperature, double endPressure, double endTemperature) {}
+    double startPressure,
+    double startTemperature,
+    double endPressure,
+    double endTemperature,
+    boolean settling) {}

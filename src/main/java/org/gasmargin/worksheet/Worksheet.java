@@ -33,6 +33,7 @@ public final class Worksheet {
       new StepsPart(content).write(flow);
       flow.section("Findings");
       flow.add(findings.full(governing.assessed()));
+      new HandCheckPart(content, governing).write(flow);
       NotAssessedPart.write(flow, content);
       new MethodPart(content).write(flow);
       AssumptionsPart.write(flow, content);

@@ -33,7 +33,12 @@ final class ExtremeSearch {
   }
 
   private static Stretch stretch(State start, State end) {
-    return new Stretch(start.pressure(), start.temperature(), end.pressure(), end.temperature());
+    return new Stretch(
+        start.pressure(),
+        start.temperature(),
+        end.pressure(),
+        end.temperature(),
+        start.molarDensity() == end.molarDensity());
   }
 
   /** Something that could set the extreme is unknown, so the extreme is. */

@@ -64,6 +64,11 @@ public final class Digits {
     if (size >= LARGE || (size > 0 && size < SMALL)) {
       return power(value);
     }
+    return plain(value, decimals);
+  }
+
+  /** The value with a number of decimals, never as a power of ten. */
+  public static String plain(double value, int decimals) {
     String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
     boolean zero = text.chars().noneMatch(c -> c >= '1' && c <= '9');
     return zero ? text.replace("-", "") : text.replace('-', '−');

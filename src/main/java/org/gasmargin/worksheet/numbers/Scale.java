@@ -1,5 +1,7 @@
 package org.gasmargin.worksheet.numbers;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
 import org.gasmargin.units.Dimension;
 import org.gasmargin.units.DisplayUnits;
 
@@ -17,9 +19,7 @@ public record Scale(double slope, double offset, String symbol) {
   /** The scale of a dimension in the units that the user typed, SI where there are none. */
   public static Scale of(Dimension dimension, DisplayUnits units) {
     return switch (dimension) {
-      case PRESSURE_DIFFERENCE -> difference(dimension, Dimension.ABSOLUTE_PRESSURE, "", units);
-      case PRESSURE_RATE -> difference(dimension, Dimension.ABSOLUTE_PRESSURE, "/s", units);
-      case TEMPERATURE_DIFFERENCE -> difference(dimension, Dimension.TEMPERATURE, "", units);
+      case PRESSURE_RATE -> pressureRate(units);
       case LENGTH -> length(units);
       default -> plain(dimension, units);
     };
@@ -74,17 +74,21 @@ public record Scale(double slope, double offset, String symbol) {
     double offset = units.number(0, dimension);
     double step = dimension == Dimension.ABSOLUTE_PRESSURE ? 1e5 : 1;
     double slope = (units.number(step, dimension) - offset) / step;
-    return new Scale(slope, offset, printed(units.symbol(dimension)));
+    return new Scale(clean(slope), clean(offset), printed(units.symbol(dimension)));
   }
 
-  private static Scale difference(
-      Dimension dimension, Dimension point, String suffix, DisplayUnits units) {
-    if (units.units().containsKey(dimension) || !units.units().containsKey(point)) {
-      return plain(dimension, units);
+  /** Without the noise of the last digits. */
+  private static double clean(double value) {
+    return new BigDecimal(value).round(new MathContext(12)).doubleValue();
+  }
+
+  /** The rate of a pressure follows the unit of the pressure unless it has one of its own. */
+  private static Scale pressureRate(DisplayUnits units) {
+    boolean own = units.units().containsKey(Dimension.PRESSURE_RATE);
+    if (own || !units.units().containsKey(Dimension.PRESSURE_DIFFERENCE)) {
+      return plain(Dimension.PRESSURE_RATE, units);
     }
-    Scale points = plain(point, units);
-    String symbol =
-        points.symbol().replace("(g)", "").replace("(a)", "").replace("°C", "K") + suffix;
-    return new Scale(points.slope(), 0, symbol);
+    Scale differences = plain(Dimension.PRESSURE_DIFFERENCE, units);
+    return new Scale(differences.slope(), 0, differences.symbol() + "/s");
   }
 }

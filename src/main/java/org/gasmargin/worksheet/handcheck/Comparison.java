@@ -1,0 +1,149 @@
+package org.gasmargin.worksheet.handcheck;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.gasmargin.worksheet.numbers.Digits;
+
+/**
+ * Ideal gas against real gas for one number.
+ *
+ * @param calculation the closed form
+ * @param real the real-gas value, K or Pa absolute
+ * @param highest whether a highest value is looked for, not a lowest
+ * @param frame units
+ */
+record Comparison(Calculation calculation, double real, boolean highest, UnitFrame frame) {
+
+  /** Whether the real value lies in the band; empty if there is no band. */
+  Optional<Boolean> agreement() {
+    return band().map(band -> real >= low(band) && real <= high(band));
+  }
+
+  List<String> sentences() {
+    List<String> sentences = new ArrayList<>();
+    sentences.add(values());
+    sentences.add(lean());
+    sentences.add(bandSentence());
+    return sentences;
+  }
+
+  private Optional<Bands.Band> band() {
+    return Bands.find(calculation.band());
+  }
+
+  private String values() {
+    double difference = calculation.ideal() - real;
+    return "Ideal gas "
+        + text(calculation.ideal())
+        + ", real gas "
+        + text(real)
+        + ": the ideal formula gives "
+        + differenceText(Math.abs(difference))
+        + (difference >= 0 ? " more." : " less.");
+  }
+
+  private String lean() {
+    double difference = calculation.ideal() - real;
+    if (Math.abs(difference) < 2e-4 * real) {
+      return "The two agree so closely that the formula leans to neither side here.";
+    }
+    boolean unsafe = highest ? difference < 0 : difference > 0;
+    String extreme = highest ? "highest" : "lowest";
+    String quantity = isPressure() ? "pressure" : "temperature";
+    String side = difference < 0 ? "LOW" : "HIGH";
+    return "For a "
+        + extreme
+        + " "
+        + quantity
+        + " the ideal formula leans "
+        + side
+        + " here, which is the "
+        + (unsafe
+            ? "UNSAFE side: never use it alone. "
+            : "conservative side; that does not hold for other gases and processes. ")
+        + why();
+  }
+
+  private String why() {
+    boolean idealHigh = calculation.ideal() > real;
+    return switch (calculation.band().process()) {
+      case "charge" ->
+          idealHigh
+              ? "The real gas cools as it is throttled into the vessel and its heat capacity grows"
+                  + " with pressure and temperature; the formula knows neither."
+              : "The real gas warms as it is throttled into the vessel (it is above its inversion"
+                  + " temperature); the formula does not know that.";
+      case "compression" ->
+          idealHigh
+              ? "The heat capacity of the real gas grows as it gets hot; the formula keeps it"
+                  + " constant."
+              : "At these densities the molecules of the real gas take more work to compress than"
+                  + " the formula counts.";
+      case "vent" ->
+          idealHigh
+              ? "The real gas also works against the attraction of its molecules, or its heat"
+                  + " capacity falls as it cools; the formula knows neither."
+              : "The real gas has a larger heat capacity at these densities than the formula's"
+                  + " constant one.";
+      default ->
+          idealHigh == calculation.band().ratio() > 1
+              ? "The molecules of the real gas take up room, which counts less at the higher"
+                  + " temperature; the formula has none."
+              : "The attraction of the molecules, which holds the pressure down, counts less at the"
+                  + " higher temperature; the formula has none.";
+    };
+  }
+
+  private String bandSentence() {
+    Optional<Bands.Band> found = band();
+    if (found.isEmpty()) {
+      return "No band is known for this gas and range, so the two values cannot be held against"
+          + " each other here.";
+    }
+    Bands.Band band = found.get();
+    String words =
+        "Band: in "
+            + band.cases()
+            + " cases of "
+            + calculation.band().gas()
+            + " over this range ("
+            + band.range()
+            + "), computed with published equations of state, real over ideal lay between "
+            + Digits.plain(band.lower(), 3)
+            + " and "
+            + Digits.plain(band.upper(), 3)
+            + ", so here between "
+            + text(low(band))
+            + " and "
+            + text(high(band))
+            + ". ";
+    return words
+        + (agreement().orElse(false)
+            ? "The real-gas value lies inside."
+            : "THE REAL-GAS VALUE LIES OUTSIDE: do not sign before somebody has explained why.");
+  }
+
+  private double low(Bands.Band band) {
+    return band.lower() * calculation.ideal();
+  }
+
+  private double high(Bands.Band band) {
+    return band.upper() * calculation.ideal();
+  }
+
+  private boolean isPressure() {
+    return calculation.band().process().equals("isochore");
+  }
+
+  private String text(double value) {
+    if (isPressure()) {
+      return frame.absoluteText(value);
+    }
+    return Digits.plain(value, 1) + "\u00a0K (" + frame.temperatureText(value) + ")";
+  }
+
+  private String differenceText(double value) {
+    return isPressure() ? frame.differenceText(value) : Digits.plain(value, 1) + "\u00a0K";
+  }
+}
