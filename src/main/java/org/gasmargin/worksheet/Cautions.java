@@ -1,6 +1,5 @@
 package org.gasmargin.worksheet;
 
-import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
@@ -14,21 +13,20 @@ final class Cautions {
           + " nameplate and documents of the equipment, and licensed inspection decide, and they"
           + " prevail over any number on these pages.";
 
-  private static final List<String> ALWAYS =
-      List.of(
-          "Never exceed a marked pressure or temperature because a calculation allows it.",
-          "Gauges, plates and gas labels were taken as stated: a wrong input makes a wrong page.");
+  private static final String ALWAYS =
+      "Never exceed a marked pressure or temperature because a calculation allows it. Gauges,"
+          + " plates and gas labels were taken as stated: a wrong input makes a wrong page.";
 
   private Cautions() {}
 
-  /** The cautions that always hold, then those of some findings, each once. */
-  static List<String> of(List<Finding> findings) {
-    Set<String> cautions = new LinkedHashSet<>(ALWAYS);
-    for (Finding finding : findings) {
-      if (!finding.caution().isBlank()) {
-        cautions.add(Prose.tidy(finding.caution()));
-      }
-    }
-    return new ArrayList<>(cautions);
+  /** The cautions that always hold, then those of some findings; no sentence stands twice. */
+  static String of(List<Finding> findings) {
+    Set<String> sentences = new LinkedHashSet<>(sentences(ALWAYS));
+    findings.forEach(finding -> sentences.addAll(sentences(finding.caution())));
+    return String.join(" ", sentences);
+  }
+
+  private static List<String> sentences(String text) {
+    return text.isBlank() ? List.of() : List.of(Prose.sentence(text).split("(?<=[.!?]) +", -1));
   }
 }

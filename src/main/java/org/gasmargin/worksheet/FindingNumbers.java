@@ -10,16 +10,20 @@ import org.gasmargin.worksheet.numbers.Scale;
 /** The numbers of a finding in the user's units, all with the same decimals. */
 final class FindingNumbers {
   private static final String UNKNOWN = "–";
+  private static final char NO_BREAK = '\u00a0';
 
   private final Finding finding;
   private final Scale scale;
   private final Scale differences;
+  private final double largest;
   private final int decimals;
 
   FindingNumbers(Finding finding, DisplayUnits units) {
     this.finding = finding;
     this.scale = Scale.of(finding.dimension(), units);
     this.differences = Scale.ofDifference(finding.dimension(), units);
+    double predicted = Math.abs(scale.shown(finding.predicted().orElse(0)));
+    this.largest = Math.max(predicted, Math.abs(scale.shown(finding.limit().orElse(0))));
     this.decimals = finding.dimension() == Dimension.TEMPERATURE ? 1 : decimals();
   }
 
@@ -40,12 +44,16 @@ final class FindingNumbers {
   }
 
   private int decimals() {
-    double predicted = scale.shown(finding.predicted().orElse(0));
-    double limit = scale.shown(finding.limit().orElse(0));
-    return Digits.decimalsFor(predicted, limit);
+    return Digits.decimalsFor(largest);
   }
 
   private String text(OptionalDouble value, Scale in) {
-    return value.isPresent() ? in.text(value.getAsDouble(), decimals) : UNKNOWN;
+    if (value.isEmpty()) {
+      return UNKNOWN;
+    }
+    double shown = in.shown(value.getAsDouble());
+    boolean tiny = Math.abs(shown) < 0.5 * Math.pow(10, -decimals) && largest >= 1e-3;
+    String number = tiny ? Digits.plain(shown, decimals) : Digits.of(shown, decimals);
+    return number + NO_BREAK + in.symbol();
   }
 }

@@ -6,7 +6,6 @@ import org.gasmargin.process.Step;
 import org.gasmargin.process.StepResult;
 import org.gasmargin.rules.Finding;
 import org.gasmargin.rules.JudgeOn;
-import org.gasmargin.worksheet.layout.Barred;
 import org.gasmargin.worksheet.layout.Block;
 import org.gasmargin.worksheet.layout.Columns;
 import org.gasmargin.worksheet.layout.Flow;
@@ -17,8 +16,6 @@ import org.gasmargin.worksheet.layout.Style;
 
 /** The top of the first page: title, verdict, reason, what was judged on, cautions. */
 final class HeadingPart {
-  private static final int MOST_CAUTIONS = 6;
-
   private final WorksheetContent content;
   private final Governing governing;
 
@@ -39,7 +36,7 @@ final class HeadingPart {
     flow.gap(4);
     judgedOn().forEach(flow::add);
     flow.gap(7);
-    flow.add(new Barred(cautions(deciding), 4, 0, 0.94f));
+    flow.add(CautionBox.of(deciding));
   }
 
   private List<Block> titles() {
@@ -55,13 +52,23 @@ final class HeadingPart {
             Style.BODY));
   }
 
+  /** For example {@code Step 1, receiver: highest gas temperature 107.3 °C, limit 65 °C: ...}. */
   private String reason(Finding finding) {
-    return "Step "
-        + finding.step()
-        + ", "
-        + finding.vessel()
-        + ": "
-        + Prose.sentence(finding.reason());
+    FindingNumbers numbers = new FindingNumbers(finding, content.units());
+    StringBuilder sentence = new StringBuilder("Step ");
+    sentence.append(finding.step()).append(", ").append(finding.vessel()).append(": ");
+    if (Governing.hasBar(finding)) {
+      sentence.append(Prose.tidy(finding.quantity())).append(' ').append(numbers.predicted());
+      sentence.append(", limit ").append(numbers.limit());
+      finding
+          .limitOrigin()
+          .ifPresent(origin -> sentence.append(" (").append(Prose.tidy(origin)).append(')'));
+      sentence.append(": ");
+    } else if (finding.predicted().isPresent()) {
+      sentence.append(Prose.tidy(finding.title())).append(": ");
+    }
+    String why = Prose.sentence(finding.reason());
+    return sentence + why;
   }
 
   private List<Block> judgedOn() {
@@ -96,18 +103,5 @@ final class HeadingPart {
             .credited()
             .map(credited -> Prose.sentence(credited.allowance()))
             .orElse("no modelled path, so nothing is credited.");
-  }
-
-  private List<Block> cautions(List<Finding> deciding) {
-    List<String> all = Cautions.of(deciding);
-    List<Block> blocks = new ArrayList<>();
-    blocks.add(
-        Paragraph.of(
-            new Run("CAUTION  ", Style.STRONG), new Run(Cautions.DEFERENCE, Style.STRONG)));
-    for (String caution : all.subList(0, Math.min(MOST_CAUTIONS, all.size()))) {
-      blocks.add(new Gap(2));
-      blocks.add(Paragraph.of(caution, Style.BODY));
-    }
-    return blocks;
   }
 }

@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import org.gasmargin.gas.Gas;
 import org.gasmargin.gas.ValidityRange;
@@ -27,6 +28,8 @@ import org.gasmargin.worksheet.numbers.Scale;
 
 /** How the numbers were made, how far the models hold, and what is left over in the balances. */
 final class MethodPart {
+  private static final int PACK_HASH_DIGITS = 16;
+
   private final WorksheetContent content;
   private final Scale temperature;
   private final Scale pressure;
@@ -54,13 +57,8 @@ final class MethodPart {
       warnings(gas).forEach(warning -> labelled(flow, "Beyond the fit", warning));
     }
     materials().forEach((name, source) -> labelled(flow, "Material " + name, source));
-    for (PackUsed pack : content.judgement().packs()) {
-      labelled(
-          flow,
-          "Rule pack " + pack.name(),
-          Prose.sentence(pack.because()) + " SHA-256 " + pack.sha256() + ".");
-    }
-    notApplied().forEach((rule, why) -> labelled(flow, "Not applied", rule + why));
+    labelled(flow, "Rule packs", packs());
+    notApplied().ifPresent(rules -> labelled(flow, "Rules that do not concern a step", rules));
     labelled(
         flow,
         "Identity",
@@ -176,17 +174,26 @@ final class MethodPart {
     return sources;
   }
 
+  private String packs() {
+    List<String> packs = new ArrayList<>();
+    for (PackUsed pack : content.judgement().packs()) {
+      String hash = pack.sha256();
+      String start = hash.substring(0, Math.min(PACK_HASH_DIGITS, hash.length()));
+      packs.add(pack.name() + " (" + pack.because() + "; SHA-256 " + start + "…)");
+    }
+    return String.join("; ", packs) + ".";
+  }
+
   /** Rules with the steps that they do not concern, and why. */
-  private Map<String, String> notApplied() {
+  private Optional<String> notApplied() {
     Map<String, List<String>> steps = new LinkedHashMap<>();
     for (NotApplied rule : content.judgement().notApplied()) {
       steps
-          .computeIfAbsent(
-              rule.rule() + ": " + Prose.sentence(rule.reason()), r -> new ArrayList<>())
+          .computeIfAbsent(rule.rule() + ": " + Prose.tidy(rule.reason()), r -> new ArrayList<>())
           .add(rule.step());
     }
-    Map<String, String> result = new LinkedHashMap<>();
-    steps.forEach((rule, of) -> result.put(rule, " Step " + String.join(", ", of) + "."));
-    return result;
+    List<String> rules = new ArrayList<>();
+    steps.forEach((rule, of) -> rules.add(rule + " (step " + String.join(", ", of) + ")"));
+    return rules.isEmpty() ? Optional.empty() : Optional.of(String.join("; ", rules) + ".");
   }
 }

@@ -6,6 +6,7 @@ import java.util.OptionalDouble;
 import java.util.function.Function;
 import java.util.function.ToDoubleFunction;
 import org.gasmargin.process.Path;
+import org.gasmargin.process.PathKind;
 import org.gasmargin.process.PathOutcome;
 import org.gasmargin.process.StepResult;
 import org.gasmargin.units.Dimension;
@@ -53,7 +54,11 @@ final class PathTable {
             durations(paths, time));
     List<Table.Row> rows = new ArrayList<>();
     for (PathLook look : PathLook.ALL) {
-      rows.add(row(look, result.paths().get(look.kind()), quantities));
+      PathOutcome outcome = result.paths().get(look.kind());
+      boolean foreign = look.kind() == PathKind.UNMIXED && outcome instanceof PathOutcome.Absent;
+      if (!foreign) {
+        rows.add(row(look, outcome, quantities));
+      }
     }
     return new Table(columns(time), rows);
   }

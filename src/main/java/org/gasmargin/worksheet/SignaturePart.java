@@ -1,15 +1,8 @@
 package org.gasmargin.worksheet;
 
-import java.util.ArrayList;
 import java.util.List;
-import org.gasmargin.worksheet.layout.Barred;
-import org.gasmargin.worksheet.layout.Block;
 import org.gasmargin.worksheet.layout.Cell;
 import org.gasmargin.worksheet.layout.Flow;
-import org.gasmargin.worksheet.layout.Gap;
-import org.gasmargin.worksheet.layout.Paragraph;
-import org.gasmargin.worksheet.layout.Run;
-import org.gasmargin.worksheet.layout.Style;
 import org.gasmargin.worksheet.layout.Table;
 
 /** Boxes for the people who answer for the sheet, under the cautions once more. */
@@ -18,15 +11,7 @@ final class SignaturePart {
 
   static void write(Flow flow, WorksheetContent content) {
     flow.section("Signatures");
-    List<Block> cautions = new ArrayList<>();
-    cautions.add(
-        Paragraph.of(
-            new Run("CAUTION  ", Style.STRONG), new Run(Cautions.DEFERENCE, Style.STRONG)));
-    for (String caution : Cautions.of(content.judgement().findings())) {
-      cautions.add(new Gap(1.5f));
-      cautions.add(Paragraph.of(caution, Style.TABLE));
-    }
-    flow.add(new Barred(cautions, 4, 0, 0.94f));
+    flow.add(CautionBox.of(content.judgement().findings()));
     flow.gap(6);
     flow.add(
         new Table(

@@ -23,7 +23,7 @@ import org.gasmargin.worksheet.plot.Plot;
 
 /** Pressure and temperature of one step against time, and pressure against specific volume. */
 final class StepPlots {
-  private static final float HEIGHT = 122;
+  private static final float HEIGHT = 112;
 
   private static final Map<LimitKind, String> TEMPERATURE_LIMITS =
       Map.of(

@@ -32,7 +32,7 @@ public final class Worksheet {
       InputsPart.write(flow, content);
       new StepsPart(content).write(flow);
       flow.section("Findings");
-      flow.add(findings.full(governing.assessed()));
+      flow.add(findings.full(FindingGroup.of(governing.assessed())));
       new HandCheckPart(content, governing).write(flow);
       NotAssessedPart.write(flow, content);
       new MethodPart(content).write(flow);
@@ -48,7 +48,8 @@ public final class Worksheet {
   private static void governingFindings(Flow flow, Governing governing, FindingsTable table) {
     List<Finding> deciding = governing.findings();
     flow.section("Governing findings");
-    flow.add(table.brief(deciding.subList(0, Math.min(MOST_ON_FIRST_PAGE, deciding.size()))));
+    List<FindingGroup> groups = FindingGroup.of(deciding);
+    flow.add(table.brief(groups.subList(0, Math.min(MOST_ON_FIRST_PAGE, groups.size()))));
   }
 
   private static Sheet.Marks marks(WorksheetContent content) {

@@ -15,8 +15,8 @@ public record Table(List<Column> columns, List<Row> rows) implements Block {
   /** Space left and right of a cell's text, pt. */
   static final float PADDING = 3;
 
-  private static final float ABOVE = 2;
-  private static final float BELOW = 2;
+  private static final float ABOVE = 1.3f;
+  private static final float BELOW = 1.3f;
   private static final int LINES_HELD_TOGETHER = 30;
   private static final int ROWS_HELD_TOGETHER = 6;
   private static final Stroke HEAD_RULE = Stroke.solid(0.7f, 0.2f);

@@ -76,6 +76,9 @@ public final class Digits {
 
   /** The value as a number between 1 and 10 times a power of ten. */
   public static String power(double value) {
+    if (value == 0) {
+      return "0";
+    }
     String[] parts = String.format(Locale.ROOT, "%.3e", value).split("e", 2);
     StringBuilder exponent = new StringBuilder();
     int number = Integer.parseInt(parts[1]);
