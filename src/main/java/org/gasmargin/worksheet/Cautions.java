@@ -3,6 +3,7 @@ package org.gasmargin.worksheet;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
+import java.util.stream.Collectors;
 import org.gasmargin.rules.Finding;
 
 /** The cautions of a sheet: those that always hold and those of its findings. */
@@ -24,6 +25,19 @@ final class Cautions {
     Set<String> sentences = new LinkedHashSet<>(sentences(ALWAYS));
     findings.forEach(finding -> sentences.addAll(sentences(finding.caution())));
     return String.join(" ", sentences);
+  }
+
+  /** The sentences of a group's caution that no other rule shares. */
+  static String ownOf(FindingGroup group, List<Finding> all) {
+    Set<String> shared = new LinkedHashSet<>();
+    for (Finding finding : all) {
+      if (!finding.rule().equals(group.first().rule())) {
+        shared.addAll(sentences(finding.caution()));
+      }
+    }
+    return sentences(group.first().caution()).stream()
+        .filter(sentence -> !shared.contains(sentence))
+        .collect(Collectors.joining(" "));
   }
 
   private static List<String> sentences(String text) {

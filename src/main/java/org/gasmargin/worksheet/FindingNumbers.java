@@ -10,7 +10,6 @@ import org.gasmargin.worksheet.numbers.Scale;
 /** The numbers of a finding in the user's units, all with the same decimals. */
 final class FindingNumbers {
   private static final String UNKNOWN = "–";
-  private static final char NO_BREAK = '\u00a0';
 
   private final Finding finding;
   private final Scale scale;
@@ -25,6 +24,18 @@ final class FindingNumbers {
     double predicted = Math.abs(scale.shown(finding.predicted().orElse(0)));
     this.largest = Math.max(predicted, Math.abs(scale.shown(finding.limit().orElse(0))));
     this.decimals = finding.dimension() == Dimension.TEMPERATURE ? 1 : decimals();
+  }
+
+  /** The unit of the predicted value and the limit. */
+  String unit() {
+    return finding.predicted().isPresent() || finding.limit().isPresent() ? scale.symbol() : "";
+  }
+
+  /** The unit of the margins. */
+  String differenceUnit() {
+    return finding.margin().isPresent() || finding.requiredMargin().isPresent()
+        ? differences.symbol()
+        : "";
   }
 
   String predicted() {
@@ -54,6 +65,6 @@ final class FindingNumbers {
     double shown = in.shown(value.getAsDouble());
     boolean tiny = Math.abs(shown) < 0.5 * Math.pow(10, -decimals) && largest >= 1e-3;
     String number = tiny ? Digits.plain(shown, decimals) : Digits.of(shown, decimals);
-    return number + NO_BREAK + in.symbol();
+    return number;
   }
 }

@@ -13,7 +13,8 @@ import org.gasmargin.worksheet.plot.MarginBar;
 
 /** Findings as tables with margin bars. */
 final class FindingsTable {
-  private static final float BAR_WIDTH = 84;
+  private static final float BAR_WIDTH = 80;
+  private static final float WIDE_BAR_WIDTH = 150;
 
   private final WorksheetContent content;
   private final Governing governing;
@@ -28,22 +29,22 @@ final class FindingsTable {
     List<Table.Row> rows = new ArrayList<>();
     for (FindingGroup group : groups) {
       for (FindingGroup.Line line : group.lines()) {
-        rows.add(row(line, Cell.name(name(line.finding())), false));
+        rows.add(row(line, List.of(Cell.name(name(line.finding()))), false));
       }
     }
-    return new Table(columns("Finding"), rows);
+    return new Table(columns(List.of(Table.Column.text("Finding")), BAR_WIDTH), rows);
   }
 
-  /** The rule, a row for each set of numbers with its path, then source and caution. */
+  /** The rule, a row for each set of numbers, then their paths, source and caution. */
   Table full(List<FindingGroup> groups) {
     List<Table.Row> rows = new ArrayList<>();
-    List<Table.Column> columns = columns("Path or reason");
+    List<Table.Column> columns = columns(List.of(), WIDE_BAR_WIDTH);
     for (FindingGroup group : groups) {
       rows.add(new Table.Row(List.of(title(group.first()).across(columns.size())), true));
       for (FindingGroup.Line line : group.lines()) {
-        rows.add(row(line, Cell.of(pathOrReason(line.finding())), true));
+        rows.add(row(line, List.of(), true));
       }
-      rows.add(Table.Row.of(Cell.of(details(group.first())).across(columns.size())));
+      rows.add(Table.Row.of(Cell.of(details(group)).across(columns.size())));
     }
     return new Table(columns, rows);
   }
@@ -55,34 +56,38 @@ final class FindingsTable {
     return Prose.tidy(alone ? what : finding.vessel() + ": " + what);
   }
 
-  private static List<Table.Column> columns(String second) {
-    return List.of(
-        Table.Column.text("Step"),
-        Table.Column.text(second),
-        Table.Column.text("reference → limit").wide(BAR_WIDTH),
-        Table.Column.numbers("Predicted"),
-        Table.Column.numbers("Limit"),
-        Table.Column.numbers("Margin"),
-        Table.Column.numbers("Required"),
-        Table.Column.text("Verdict"));
+  private static List<Table.Column> columns(List<Table.Column> named, float barWidth) {
+    List<Table.Column> columns = new ArrayList<>();
+    columns.add(Table.Column.text("Step"));
+    columns.addAll(named);
+    columns.add(Table.Column.text("reference → limit").wide(barWidth));
+    columns.add(Table.Column.numbers("Predicted"));
+    columns.add(Table.Column.numbers("Limit"));
+    columns.add(Table.Column.text("Unit"));
+    columns.add(Table.Column.numbers("Margin"));
+    columns.add(Table.Column.numbers("Required"));
+    columns.add(Table.Column.text("Unit"));
+    columns.add(Table.Column.text("Verdict"));
+    return columns;
   }
 
-  private Table.Row row(FindingGroup.Line line, Cell second, boolean keptWithNext) {
+  private Table.Row row(FindingGroup.Line line, List<Cell> named, boolean keptWithNext) {
     Finding finding = line.finding();
     FindingNumbers numbers = new FindingNumbers(finding, content.units());
     boolean within = finding.verdict() == Verdict.WITHIN_LIMITS;
     Style style = within ? Style.TABLE : Style.TABLE.strong();
-    return new Table.Row(
-        List.of(
-            Cell.of(line.stepWords()),
-            second,
-            Governing.hasBar(finding) ? Cell.of(bar(finding, numbers)) : Cell.of(""),
-            Cell.of(numbers.predicted()),
-            Cell.of(numbers.limit()),
-            Cell.of(numbers.margin()),
-            Cell.of(numbers.requiredMargin()),
-            Cell.of(new Run(finding.verdict().words().replace(' ', '\u00a0'), style))),
-        keptWithNext);
+    List<Cell> cells = new ArrayList<>();
+    cells.add(Cell.of(line.stepWords()));
+    cells.addAll(named);
+    cells.add(Governing.hasBar(finding) ? Cell.of(bar(finding, numbers)) : Cell.of(""));
+    cells.add(Cell.of(numbers.predicted()));
+    cells.add(Cell.of(numbers.limit()));
+    cells.add(Cell.of(numbers.unit()));
+    cells.add(Cell.of(numbers.margin()));
+    cells.add(Cell.of(numbers.requiredMargin()));
+    cells.add(Cell.of(numbers.differenceUnit()));
+    cells.add(Cell.of(new Run(finding.verdict().words().replace(' ', '\u00a0'), style)));
+    return new Table.Row(cells, keptWithNext);
   }
 
   private Figure bar(Finding finding, FindingNumbers numbers) {
@@ -91,10 +96,14 @@ final class FindingsTable {
             + numbers.predicted()
             + " against limit "
             + numbers.limit()
+            + " "
+            + numbers.unit()
             + ", margin "
             + numbers.margin()
             + ", required "
-            + numbers.requiredMargin();
+            + numbers.requiredMargin()
+            + " "
+            + numbers.differenceUnit();
     return new Figure(MarginBar.HEIGHT, alternative, governing.bar(finding));
   }
 
@@ -106,20 +115,26 @@ final class FindingsTable {
         new Run("  " + finding.rule(), Style.SMALL));
   }
 
-  private static String pathOrReason(Finding finding) {
-    boolean told = Governing.hasBar(finding) && !finding.path().isBlank();
-    return told ? Prose.tidy(finding.path()) : Prose.sentence(finding.reason());
-  }
-
-  private static Run[] details(Finding finding) {
+  private Run[] details(FindingGroup group) {
+    Finding finding = group.first();
     List<Run> runs = new ArrayList<>();
     label(runs, "Predicted: ", finding.quantity());
+    for (FindingGroup.Line line : group.lines()) {
+      String path = pathOrReason(line.finding());
+      label(runs, " Step " + line.stepWords() + ": ", path);
+    }
     finding.limitOrigin().ifPresent(origin -> label(runs, " Limit read from: ", origin));
     label(runs, " Source: ", finding.source() + " (" + finding.sourceStatus() + ")");
-    if (!finding.caution().isBlank()) {
-      label(runs, " Caution: ", finding.caution());
+    String caution = Cautions.ownOf(group, content.judgement().findings());
+    if (!caution.isBlank()) {
+      label(runs, " Caution: ", caution);
     }
     return runs.toArray(new Run[0]);
+  }
+
+  private static String pathOrReason(Finding finding) {
+    boolean told = Governing.hasBar(finding) && !finding.path().isBlank();
+    return told ? finding.path() : finding.reason();
   }
 
   private static void label(List<Run> runs, String label, String text) {

@@ -59,7 +59,9 @@ final class HeadingPart {
     sentence.append(finding.step()).append(", ").append(finding.vessel()).append(": ");
     if (Governing.hasBar(finding)) {
       sentence.append(Prose.tidy(finding.quantity())).append(' ').append(numbers.predicted());
+      sentence.append('\u00a0').append(numbers.unit());
       sentence.append(", limit ").append(numbers.limit());
+      sentence.append('\u00a0').append(numbers.unit());
       finding
           .limitOrigin()
           .ifPresent(origin -> sentence.append(" (").append(Prose.tidy(origin)).append(')'));
@@ -67,8 +69,7 @@ final class HeadingPart {
     } else if (finding.predicted().isPresent()) {
       sentence.append(Prose.tidy(finding.title())).append(": ");
     }
-    String why = Prose.sentence(finding.reason());
-    return sentence + why;
+    return sentence + Prose.sentence(finding.reason());
   }
 
   private List<Block> judgedOn() {

@@ -9,24 +9,19 @@ import java.util.Optional;
 import java.util.Set;
 import org.gasmargin.gas.Gas;
 import org.gasmargin.gas.ValidityRange;
-import org.gasmargin.process.Closure;
 import org.gasmargin.process.Path;
 import org.gasmargin.process.StepResult;
 import org.gasmargin.rules.NotApplied;
 import org.gasmargin.rules.PackUsed;
 import org.gasmargin.units.Dimension;
-import org.gasmargin.vessel.Layer;
 import org.gasmargin.vessel.Vessel;
-import org.gasmargin.worksheet.layout.Cell;
 import org.gasmargin.worksheet.layout.Flow;
 import org.gasmargin.worksheet.layout.Paragraph;
 import org.gasmargin.worksheet.layout.Run;
 import org.gasmargin.worksheet.layout.Style;
-import org.gasmargin.worksheet.layout.Table;
-import org.gasmargin.worksheet.numbers.Digits;
 import org.gasmargin.worksheet.numbers.Scale;
 
-/** How the numbers were made, how far the models hold, and what is left over in the balances. */
+/** How the numbers were made and how far the models hold. */
 final class MethodPart {
   private static final int PACK_HASH_DIGITS = 16;
 
@@ -41,8 +36,6 @@ final class MethodPart {
   }
 
   void write(Flow flow) {
-    flow.section("Closure of mass and energy");
-    flow.add(closures());
     flow.section("Method, validity and sources");
     labelled(
         flow,
@@ -56,7 +49,8 @@ final class MethodPart {
       labelled(flow, gas.name(), validity(gas));
       warnings(gas).forEach(warning -> labelled(flow, "Beyond the fit", warning));
     }
-    materials().forEach((name, source) -> labelled(flow, "Material " + name, source));
+    WallSources.of(content.result().procedure())
+        .forEach((name, text) -> labelled(flow, name, text));
     labelled(flow, "Rule packs", packs());
     notApplied().ifPresent(rules -> labelled(flow, "Rules that do not concern a step", rules));
     labelled(
@@ -72,36 +66,6 @@ final class MethodPart {
   private static void labelled(Flow flow, String label, String text) {
     flow.add(Paragraph.of(new Run(label + ": ", Style.TABLE.strong()), new Run(text, Style.TABLE)));
     flow.gap(2);
-  }
-
-  private Table closures() {
-    List<Table.Row> rows = new ArrayList<>();
-    for (StepResult result : content.result().steps()) {
-      rows.add(
-          result
-              .closure()
-              .map(
-                  closure ->
-                      Table.Row.of(
-                          Cell.name("Step " + result.step().id()),
-                          Cell.of(Digits.power(closure.massRelative())),
-                          Cell.of(Digits.power(closure.energyRelative())),
-                          Cell.of(Digits.power(Closure.BOUND)),
-                          Cell.of(closure.holds() ? "holds" : "DOES NOT HOLD: not assessed")))
-              .orElseGet(
-                  () ->
-                      Table.Row.of(
-                          Cell.name("Step " + result.step().id()),
-                          Cell.of("no balance: nothing could be computed").across(4))));
-    }
-    return new Table(
-        List.of(
-            Table.Column.text("Step"),
-            Table.Column.numbers("Mass left over, relative"),
-            Table.Column.numbers("Energy left over, relative"),
-            Table.Column.numbers("Bound"),
-            Table.Column.text("Result")),
-        rows);
   }
 
   private Set<Gas> gases() {
@@ -159,21 +123,6 @@ final class MethodPart {
         .orElseThrow();
   }
 
-  private Map<String, String> materials() {
-    Map<String, String> sources = new LinkedHashMap<>();
-    for (Vessel vessel : content.result().procedure().vessels()) {
-      vessel
-          .wall()
-          .ifPresent(
-              wall -> {
-                for (Layer layer : wall.layers()) {
-                  sources.put(layer.material().name(), Prose.sentence(layer.material().source()));
-                }
-              });
-    }
-    return sources;
-  }
-
   private String packs() {
     List<String> packs = new ArrayList<>();
     for (PackUsed pack : content.judgement().packs()) {
@@ -184,16 +133,29 @@ final class MethodPart {
     return String.join("; ", packs) + ".";
   }
 
-  /** Rules with the steps that they do not concern, and why. */
+  /** Reasons with the rules and steps to which they apply. */
   private Optional<String> notApplied() {
-    Map<String, List<String>> steps = new LinkedHashMap<>();
+    Map<String, Set<String>> stepsByRule = new LinkedHashMap<>();
+    Map<String, String> reasons = new LinkedHashMap<>();
     for (NotApplied rule : content.judgement().notApplied()) {
-      steps
-          .computeIfAbsent(rule.rule() + ": " + Prose.tidy(rule.reason()), r -> new ArrayList<>())
-          .add(rule.step());
+      String key = rule.rule() + "\n" + rule.reason();
+      stepsByRule.computeIfAbsent(key, r -> new LinkedHashSet<>()).add(rule.step());
+      reasons.put(key, Prose.tidy(rule.reason()));
     }
-    List<String> rules = new ArrayList<>();
-    steps.forEach((rule, of) -> rules.add(rule + " (step " + String.join(", ", of) + ")"));
-    return rules.isEmpty() ? Optional.empty() : Optional.of(String.join("; ", rules) + ".");
+    Map<String, Set<String>> rulesByReason = new LinkedHashMap<>();
+    reasons.forEach(
+        (key, reason) ->
+            rulesByReason
+                .computeIfAbsent(
+                    reason + " (step " + String.join(", ", stepsOf(stepsByRule, key)) + "): ",
+                    r -> new LinkedHashSet<>())
+                .add(key.substring(0, key.indexOf('\n'))));
+    List<String> told = new ArrayList<>();
+    rulesByReason.forEach((reason, rules) -> told.add(reason + String.join(", ", rules)));
+    return told.isEmpty() ? Optional.empty() : Optional.of(String.join("; ", told) + ".");
+  }
+
+  private static Set<String> stepsOf(Map<String, Set<String>> stepsByRule, String key) {
+    return stepsByRule.getOrDefault(key, Set.of());
   }
 }

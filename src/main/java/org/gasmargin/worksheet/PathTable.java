@@ -27,11 +27,13 @@ final class PathTable {
   private final Scale temperature;
   private final Scale pressure;
   private final Scale mass;
+  private final boolean massChosen;
 
   PathTable(DisplayUnits units) {
     temperature = Scale.of(Dimension.TEMPERATURE, units);
     pressure = Scale.of(Dimension.ABSOLUTE_PRESSURE, units);
     mass = Scale.of(Dimension.MASS, units);
+    massChosen = units.units().containsKey(Dimension.MASS);
   }
 
   Table of(StepResult result) {
@@ -41,6 +43,7 @@ final class PathTable {
     }
     double longest = paths.stream().mapToDouble(Path::duration).max().orElse(1);
     Scale time = Durations.scaleFor(longest);
+    Scale masses = massScale(paths);
     List<Quantity> quantities =
         List.of(
             degrees(paths, Path::peakGasTemperature),
@@ -48,7 +51,7 @@ final class PathTable {
             degrees(paths, path -> path.last().temperature()),
             fixed(paths, pressure, Path::peakPressure),
             fixed(paths, pressure, path -> path.last().pressure()),
-            fixed(paths, mass, path -> path.last().mass()),
+            fixed(paths, masses, path -> path.last().mass()),
             new Quantity(temperature, 1, Path::peakWallTemperature),
             new Quantity(temperature, 1, Path::lowestWallTemperature),
             durations(paths, time));
@@ -60,10 +63,10 @@ final class PathTable {
         rows.add(row(look, outcome, quantities));
       }
     }
-    return new Table(columns(time), rows);
+    return new Table(columns(masses, time), rows);
   }
 
-  private List<Table.Column> columns(Scale time) {
+  private List<Table.Column> columns(Scale masses, Scale time) {
     String degrees = "\n" + temperature.symbol();
     List<String> heads =
         List.of(
@@ -72,7 +75,7 @@ final class PathTable {
             "end gas" + degrees,
             "max. p\n" + pressure.symbol(),
             "end p\n" + pressure.symbol(),
-            "end mass\n" + mass.symbol(),
+            "end mass\n" + masses.symbol(),
             "max. wall" + degrees,
             "min. wall" + degrees,
             "duration\n" + time.symbol());
@@ -121,6 +124,15 @@ final class PathTable {
     double[] shown = paths.stream().mapToDouble(path -> scale.shown(path.duration())).toArray();
     return new Quantity(
         scale, Digits.fewestDecimals(shown), path -> OptionalDouble.of(path.duration()));
+  }
+
+  /** Small amounts are shown in g or mg unless the user has a unit of mass. */
+  private Scale massScale(List<Path> paths) {
+    double largest = largest(paths, mass, path -> path.last().mass());
+    if (massChosen || largest >= 0.01) {
+      return mass;
+    }
+    return largest >= 1e-4 ? new Scale(1e3, 0, "g") : new Scale(1e6, 0, "mg");
   }
 
   private static double largest(List<Path> paths, Scale scale, ToDoubleFunction<Path> value) {

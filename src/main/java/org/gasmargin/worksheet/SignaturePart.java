@@ -1,6 +1,7 @@
 package org.gasmargin.worksheet;
 
 import java.util.List;
+import org.gasmargin.rules.Finding;
 import org.gasmargin.worksheet.layout.Cell;
 import org.gasmargin.worksheet.layout.Flow;
 import org.gasmargin.worksheet.layout.Table;
@@ -9,9 +10,9 @@ import org.gasmargin.worksheet.layout.Table;
 final class SignaturePart {
   private SignaturePart() {}
 
-  static void write(Flow flow, WorksheetContent content) {
+  static void write(Flow flow, WorksheetContent content, List<Finding> deciding) {
     flow.section("Signatures");
-    flow.add(CautionBox.of(content.judgement().findings()));
+    flow.add(CautionBox.of(deciding));
     flow.gap(6);
     flow.add(
         new Table(

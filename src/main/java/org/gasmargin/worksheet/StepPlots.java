@@ -3,13 +3,11 @@ package org.gasmargin.worksheet;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
-import java.util.Map;
 import java.util.function.ToDoubleFunction;
 import org.gasmargin.process.Path;
 import org.gasmargin.process.PathPoint;
 import org.gasmargin.process.StepResult;
 import org.gasmargin.rules.Limit;
-import org.gasmargin.rules.LimitKind;
 import org.gasmargin.units.Dimension;
 import org.gasmargin.worksheet.layout.Block;
 import org.gasmargin.worksheet.layout.Columns;
@@ -21,118 +19,121 @@ import org.gasmargin.worksheet.plot.Axis;
 import org.gasmargin.worksheet.plot.Curve;
 import org.gasmargin.worksheet.plot.Plot;
 
-/** Pressure and temperature of one step against time, and pressure against specific volume. */
+/**
+ * Pressure and temperature of one step against time, and pressure against specific volume. A step
+ * that takes no time has its temperature against its pressure instead.
+ */
 final class StepPlots {
-  private static final float HEIGHT = 112;
-
-  private static final Map<LimitKind, String> TEMPERATURE_LIMITS =
-      Map.of(
-          LimitKind.MAX_GAS_TEMPERATURE, "max. gas",
-          LimitKind.MIN_GAS_TEMPERATURE, "min. gas",
-          LimitKind.MAX_METAL_TEMPERATURE, "max. metal",
-          LimitKind.MIN_METAL_TEMPERATURE, "min. metal",
-          LimitKind.IGNITION_TEMPERATURE, "ignition");
-
-  private static final Map<LimitKind, String> PRESSURE_LIMITS =
-      Map.of(
-          LimitKind.MAX_PRESSURE, "max.",
-          LimitKind.MIN_PRESSURE, "min.",
-          LimitKind.TEST_PRESSURE, "test",
-          LimitKind.WORKING_PRESSURE, "working");
+  private static final float HEIGHT = 106;
+  private static final int PLACES = 3;
 
   private final WorksheetContent content;
-  private final Scale temperature;
-  private final Scale pressure;
+  private final Quantity temperature;
+  private final Quantity pressure;
 
   StepPlots(WorksheetContent content) {
     this.content = content;
-    temperature = Scale.of(Dimension.TEMPERATURE, content.units());
-    pressure = Scale.of(Dimension.ABSOLUTE_PRESSURE, content.units());
-  }
-
-  /** The plots side by side; no columns if no path was computed. */
-  List<Block> of(StepResult result) {
-    List<PathLook> looks = new ArrayList<>();
-    for (PathLook look : PathLook.ALL) {
-      if (result.path(look.kind()).isPresent()) {
-        looks.add(look);
-      }
-    }
-    if (looks.isEmpty()) {
-      return List.of();
-    }
-    List<Block> plots = new ArrayList<>();
-    plots.add(
-        overTime(result, looks, "Pressure", "p", pressure, PathPoint::pressure, PRESSURE_LIMITS));
-    plots.add(
-        overTime(
-            result,
-            looks,
+    temperature =
+        new Quantity(
             "Gas temperature",
             "T",
-            temperature,
-            PathPoint::temperature,
-            TEMPERATURE_LIMITS));
-    new VolumePlot(content, result, pressure).figure(HEIGHT).ifPresent(plots::add);
+            Dimension.TEMPERATURE,
+            Scale.of(Dimension.TEMPERATURE, content.units()),
+            PathPoint::temperature);
+    pressure =
+        new Quantity(
+            "Pressure",
+            "p",
+            Dimension.ABSOLUTE_PRESSURE,
+            Scale.of(Dimension.ABSOLUTE_PRESSURE, content.units()),
+            PathPoint::pressure);
+  }
+
+  private record Quantity(
+      String name,
+      String symbol,
+      Dimension dimension,
+      Scale scale,
+      ToDoubleFunction<PathPoint> value) {
+    double shown(PathPoint point) {
+      return scale.shown(value.applyAsDouble(point));
+    }
+
+    String title() {
+      return symbol + " / " + scale.symbol();
+    }
+  }
+
+  private record Drawn(PathLook look, Path path) {}
+
+  /** The plots side by side; none if no path was computed. */
+  List<Block> of(StepResult result) {
+    List<Drawn> drawn = new ArrayList<>();
+    for (PathLook look : PathLook.ALL) {
+      result.path(look.kind()).ifPresent(path -> drawn.add(new Drawn(look, path)));
+    }
+    if (drawn.isEmpty()) {
+      return List.of();
+    }
+    drawn.sort(Comparator.comparingDouble(one -> -one.look().stroke().width()));
+    List<Block> plots = new ArrayList<>();
+    double longest = drawn.stream().mapToDouble(one -> one.path().duration()).max().orElseThrow();
+    if (longest > 0) {
+      Quantity time =
+          new Quantity("time", "t", Dimension.TIME, Durations.scaleFor(longest), PathPoint::time);
+      plots.add(figure(result, drawn, time, pressure));
+      plots.add(figure(result, drawn, time, temperature));
+    } else {
+      plots.add(figure(result, drawn, pressure, temperature));
+    }
+    new VolumePlot(content, result, pressure.scale()).figure(HEIGHT).ifPresent(plots::add);
     List<List<Block>> columns = new ArrayList<>();
-    for (int i = 0; i < 3; i++) {
+    for (int i = 0; i < PLACES; i++) {
       columns.add(i < plots.size() ? List.of(plots.get(i)) : List.of());
     }
     return List.of(new Columns(columns, List.of(1 / 3f, 1 / 3f, 1 / 3f), 6));
   }
 
-  private Figure overTime(
-      StepResult result,
-      List<PathLook> looks,
-      String name,
-      String symbol,
-      Scale scale,
-      ToDoubleFunction<PathPoint> value,
-      Map<LimitKind, String> limitNames) {
-    List<Path> paths = looks.stream().map(look -> result.path(look.kind()).orElseThrow()).toList();
-    Scale time = Durations.scaleFor(paths.stream().mapToDouble(Path::duration).max().orElseThrow());
+  private Figure figure(StepResult result, List<Drawn> drawn, Quantity along, Quantity across) {
     List<Curve> curves = new ArrayList<>();
-    double least = Double.POSITIVE_INFINITY;
-    double most = Double.NEGATIVE_INFINITY;
-    double longest = 0;
-    StringBuilder told = new StringBuilder(name + " against time, step " + result.step().id());
-    for (int i = 0; i < paths.size(); i++) {
+    double[] x = {Double.POSITIVE_INFINITY, Double.NEGATIVE_INFINITY};
+    double[] y = {Double.POSITIVE_INFINITY, Double.NEGATIVE_INFINITY};
+    StringBuilder told = new StringBuilder(across.name());
+    told.append(" against ").append(along.name()).append(", step ").append(result.step().id());
+    for (Drawn one : drawn) {
       List<Curve.Point> points = new ArrayList<>();
-      for (PathPoint point : paths.get(i).points()) {
-        double shown = scale.shown(value.applyAsDouble(point));
-        points.add(new Curve.Point(time.shown(point.time()), shown));
-        least = Math.min(least, shown);
-        most = Math.max(most, shown);
-        longest = Math.max(longest, time.shown(point.time()));
+      for (PathPoint point : one.path().points()) {
+        Curve.Point shown = new Curve.Point(along.shown(point), across.shown(point));
+        points.add(shown);
+        widen(x, shown.x());
+        widen(y, shown.y());
       }
-      curves.add(new Curve(looks.get(i).letter(), looks.get(i).stroke(), points));
-      told.append(tell(looks.get(i), points, time, scale));
+      curves.add(new Curve(one.look().letter(), one.look().stroke(), points));
+      told.append(tell(one.look(), points, along, across));
     }
-    curves.sort(Comparator.comparingDouble(curve -> -curve.stroke().width()));
-    List<Plot.LimitLine> limits = new ArrayList<>();
-    double range = Math.max(most - least, 1e-3 * Math.abs(most));
-    for (Limit limit : limits(result)) {
-      String limitName = limitNames.get(limit.kind());
-      double shown = scale.shown(limit.value().si().nominal());
-      if (limitName != null && shown > least - 0.7 * range && shown < most + 0.7 * range) {
-        limits.add(new Plot.LimitLine(shown, limitName + " " + Digits.trimmed(shown)));
-        told.append("; limit ").append(limitName).append(' ').append(Digits.trimmed(shown));
-      }
-    }
+    List<Limit> all = content.limits().getOrDefault(result.step().vessel(), List.of());
+    List<Plot.LimitLine> limits =
+        LimitLines.of(all, across.dimension(), across.scale(), y[0], y[1]);
     for (Plot.LimitLine limit : limits) {
-      least = Math.min(least, limit.value());
-      most = Math.max(most, limit.value());
+      widen(y, limit.value());
+      told.append("; limit ").append(limit.label());
     }
-    Axis x = Axis.fromZero(longest, "t / " + time.symbol());
-    Axis y = Axis.linear(least, most, symbol + " / " + scale.symbol());
-    return new Figure(HEIGHT, told.append('.').toString(), new Plot(x, y, curves, limits));
+    Axis horizontal =
+        along.dimension() == Dimension.TIME
+            ? Axis.fromZero(x[1], along.title())
+            : Axis.linear(x[0], x[1], along.title());
+    Axis vertical = Axis.linear(y[0], y[1], across.title());
+    return new Figure(
+        HEIGHT, told.append('.').toString(), new Plot(horizontal, vertical, curves, limits));
   }
 
-  private List<Limit> limits(StepResult result) {
-    return content.limits().getOrDefault(result.step().vessel(), List.of());
+  private static void widen(double[] range, double value) {
+    range[0] = Math.min(range[0], value);
+    range[1] = Math.max(range[1], value);
   }
 
-  private static String tell(PathLook look, List<Curve.Point> points, Scale time, Scale scale) {
+  private static String tell(
+      PathLook look, List<Curve.Point> points, Quantity along, Quantity across) {
     Curve.Point first = points.get(0);
     Curve.Point last = points.get(points.size() - 1);
     return "; "
@@ -142,10 +143,10 @@ final class StepPlots {
         + " to "
         + Digits.of(last.y())
         + " "
-        + scale.symbol()
-        + " in "
+        + across.scale().symbol()
+        + " at "
         + Digits.of(last.x())
         + " "
-        + time.symbol();
+        + along.scale().symbol();
   }
 }

@@ -36,8 +36,7 @@ final class StepWords {
         + compress.vessel()
         + " to "
         + number(compress.until(), Dimension.ABSOLUTE_PRESSURE)
-        + " within "
-        + Durations.text(compress.within());
+        + (compress.within() > 0 ? " within " + Durations.text(compress.within()) : ", suddenly");
   }
 
   private String drive(Drive drive) {

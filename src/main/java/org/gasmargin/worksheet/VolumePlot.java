@@ -9,6 +9,7 @@ import org.gasmargin.gas.OutsideValidity;
 import org.gasmargin.process.Path;
 import org.gasmargin.process.PathKind;
 import org.gasmargin.process.PathPoint;
+import org.gasmargin.process.Step;
 import org.gasmargin.process.StepResult;
 import org.gasmargin.vessel.Vessel;
 import org.gasmargin.worksheet.layout.Figure;
@@ -96,10 +97,10 @@ final class VolumePlot {
   }
 
   private List<Curve.Point> points(PathKind kind, Path path) {
+    boolean ofItself = kind == PathKind.UNMIXED || result.step() instanceof Step.Compress;
     List<Curve.Point> points = new ArrayList<>();
     for (PathPoint point : path.points()) {
-      double volume =
-          kind == PathKind.UNMIXED ? ofTrappedGas(point) : vessel.volume().nominal() / point.mass();
+      double volume = ofItself ? ofTrappedGas(point) : vessel.volume().nominal() / point.mass();
       double shown = pressure.shown(point.pressure());
       if (Double.isFinite(volume) && volume > 0 && shown > 0) {
         points.add(new Curve.Point(volume, shown));

@@ -35,9 +35,10 @@ public final class Worksheet {
       flow.add(findings.full(FindingGroup.of(governing.assessed())));
       new HandCheckPart(content, governing).write(flow);
       NotAssessedPart.write(flow, content);
+      ClosurePart.write(flow, content);
       new MethodPart(content).write(flow);
       AssumptionsPart.write(flow, content);
-      SignaturePart.write(flow, content);
+      SignaturePart.write(flow, content, governing.findings());
       flow.end();
       sheet.write(marks(content), out);
     } catch (UncheckedIOException e) {

@@ -1,6 +1,7 @@
 package org.gasmargin.worksheet;
 
 import static org.junit.jupiter.api.Assertions.assertArrayEquals;
+import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -9,7 +10,8 @@ import java.util.Locale;
 import org.apache.pdfbox.Loader;
 import org.apache.pdfbox.pdmodel.PDDocument;
 import org.apache.pdfbox.text.PDFTextStripper;
-import org.gasmargin.rules.JudgeOn;
+import org.gasmargin.process.Path;
+import org.gasmargin.process.PathKind;
 import org.junit.jupiter.api.Test;
 
 class WorksheetTest {
@@ -21,42 +23,84 @@ class WorksheetTest {
   @Test
   void verdictReasonAndCautionComeBeforeAnyResult() throws IOException {
     String text = PdfText.text(SampleJob.content());
-    int verdict = text.indexOf("OVER LIMIT");
-    int reason = text.indexOf("Step 3, receiver: Metal temperature, cold end reaches");
-    int judgedOn = text.indexOf("Judged on the bounding paths");
-    int caution = text.indexOf("Local codes, the nameplate and documents of the equipment");
-    int findings = text.indexOf("Governing findings");
-    int inputs = text.indexOf("Inputs as typed");
-    int results = text.indexOf("Results by step");
-    int signatures = text.indexOf("Signatures");
-    assertTrue(verdict >= 0 && verdict < reason, text);
-    assertTrue(reason < judgedOn && judgedOn < caution && caution < findings, text);
-    assertTrue(findings < inputs && inputs < results && results < signatures, text);
-    assertTrue(text.indexOf("Local codes", signatures) > 0, "cautions again at the signatures");
+    assertInOrder(
+        text,
+        "OVER LIMIT",
+        "Step 3, receiver: lowest metal temperature −",
+        "limit −20.0 °C (data sheet): The limit is passed.",
+        "Judged on the bounding paths",
+        "Local codes, the nameplate and documents of the equipment",
+        "Governing findings",
+        "Inputs as typed",
+        "Results by step",
+        "Findings",
+        "Hand check with the ideal gas",
+        "Not assessed",
+        "Closure of mass and energy",
+        "Method, validity and sources",
+        "Assumptions to be confirmed by the reviewer",
+        "Signatures",
+        "Local codes, the nameplate and documents of the equipment",
+        "Preparation",
+        "Independent check",
+        "Approval");
   }
 
   @Test
   void numbersOfARowStayInReadingOrder() throws IOException {
-    String text = PdfText.text(SampleJob.content());
-    assertTrue(text.contains("A adiabatic 137.3 24.0 137.3 200.0 200.0 8.53"), text);
+    Path path = SampleJob.result().steps().get(0).path(PathKind.ADIABATIC).orElseThrow();
+    String peak = String.format(Locale.ROOT, "%.1f", path.peakGasTemperature() - 273.15);
+    String mass = String.format(Locale.ROOT, "%.2f", path.last().mass());
+    assertInOrder(
+        PdfText.text(SampleJob.content()),
+        "Step 1: fill receiver from bank to 200 bar(g) within 180 s",
+        "A adiabatic " + peak + " 24.0 " + peak + " 200.0 200.0 " + mass);
   }
 
   @Test
   void inputsStandAsTypedWithSourceAndPlace() throws IOException {
+    assertInOrder(
+        PdfText.text(SampleJob.content()),
+        "From receiver-top-up.yaml",
+        "site.ambient_temperature 24 degC ± 4 K not stated 3:14",
+        "vessels.receiver.limits.max_gas_temperature 65 degC fill procedure 7.2 10:14");
+  }
+
+  @Test
+  void extremesNameTheirPaths() throws IOException {
+    String path =
+        SampleJob.result().steps().get(2).envelope().lowestGasTemperature().orElseThrow().path();
+    assertTrue(path.contains("then vent without heat gain"), path);
+    assertInOrder(
+        PdfText.text(SampleJob.content()),
+        "Step 3: vent receiver through an orifice of 3 mm, Cd 0.8, to 10 bar(g)",
+        "lowest gas temperature −",
+        path.replace("degC", "°C"));
+  }
+
+  @Test
+  void stepsWithTheSameNumbersShareALine() throws IOException {
     String text = PdfText.text(SampleJob.content());
-    assertTrue(
-        text.contains("vessels.receiver.limits.max_gas_temperature 65 degC fill procedure 7.2"));
-    assertTrue(text.contains("site.ambient_temperature 24 degC ± 4 K not stated 3:14"), text);
+    assertTrue(text.contains("1, 2 highest mean gas temperature"), text);
+  }
+
+  @Test
+  void missingLimitIsSetApartAndKeptOutOfTheFindings() throws IOException {
+    String text = PdfText.text(SampleJob.content());
+    int findings = text.indexOf("Findings Step reference");
+    int apart = text.indexOf("Not assessed These items are open");
+    int title = text.indexOf("Metal temperature, hot end");
+    assertTrue(findings > 0 && findings < apart && apart < title, text);
+    assertTrue(text.contains("The job gives no max_metal_temperature; look it up"), text);
   }
 
   @Test
   void creditForWallHeatStandsAtTheVerdictWithItsAllowance() throws IOException {
-    WorksheetContent content = SampleJob.withFindings(SampleJob.findings(), JudgeOn.MODELLED);
-    String text = PdfText.text(content);
-    int credit = text.indexOf("CREDIT FOR WALL HEAT");
-    int allowance = text.indexOf("Step 1: Inside film coefficient ± 30 %");
-    assertTrue(credit > 0 && credit < allowance, text);
-    assertTrue(allowance < text.indexOf("Governing findings"), text);
+    assertInOrder(
+        PdfText.text(SampleJob.credited()),
+        "CREDIT FOR WALL HEAT",
+        "Step 1: Inside film coefficient ± 30 %",
+        "Governing findings");
   }
 
   @Test
@@ -64,6 +108,7 @@ class WorksheetTest {
     WorksheetContent content = SampleJob.content();
     try (PDDocument document = Loader.loadPDF(PdfText.pdf(content))) {
       int pages = document.getNumberOfPages();
+      assertTrue(pages >= 2 && pages <= 5, pages + " pages");
       for (int page = 1; page <= pages; page++) {
         PDFTextStripper stripper = new PDFTextStripper();
         stripper.setStartPage(page);
@@ -73,14 +118,29 @@ class WorksheetTest {
         assertTrue(text.contains("Job J-0142 · revision A"), text);
         assertTrue(text.contains("inputs 3f2a9c0d1e4b5a67 · gasmargin 0.1.0"), text);
       }
+      assertEquals(
+          content.title() + ", job J-0142, worksheet",
+          document.getDocumentInformation().getTitle());
     }
-    assertTrue(PdfText.text(content).contains(content.inputsSha256()), "the whole hash once");
+    assertTrue(PdfText.text(content).contains(SampleJob.HASH), "the whole hash once");
   }
 
   @Test
   void sheetNeverSaysThatAnythingIsSafeOrApproved() throws IOException {
-    String text = PdfText.text(SampleJob.content()).toLowerCase(Locale.ROOT);
-    assertFalse(text.matches(".*\\b(safe|safely|approved|approves)\\b.*"), text);
-    assertTrue(text.contains("approval"), "the box for a person is there");
+    for (WorksheetContent content :
+        new WorksheetContent[] {SampleJob.content(), SampleJob.credited()}) {
+      String text = PdfText.text(content).toLowerCase(Locale.ROOT);
+      assertFalse(text.matches(".*\\b(safe|safely|approved|approves)\\b.*"), text);
+      assertTrue(text.contains("approval"), "the box for a person is there");
+    }
+  }
+
+  private static void assertInOrder(String text, String... parts) {
+    int from = 0;
+    for (String part : parts) {
+      int at = text.indexOf(part, from);
+      assertTrue(at >= 0, part + " is missing or out of order in: " + text);
+      from = at + part.length();
+    }
   }
 }

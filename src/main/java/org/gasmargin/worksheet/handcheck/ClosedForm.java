@@ -20,8 +20,7 @@ final class ClosedForm {
   ClosedForm(Gas gas, Stretch stretch, DisplayUnits units) {
     this.gas = gas;
     this.stretch = stretch;
-    double largest = Math.max(stretch.startPressure(), stretch.endPressure());
-    this.frame = new UnitFrame(units, largest);
+    this.frame = UnitFrame.of(stretch, units);
   }
 
   /** A rigid vessel charged without heat exchange from a main at a temperature, K, and pressure. */

@@ -130,8 +130,7 @@ public final class HandChecks {
     return calculation(step.step(), stretch, sought)
         .map(
             calculation -> {
-              UnitFrame frame =
-                  new UnitFrame(units, Math.max(stretch.startPressure(), stretch.endPressure()));
+              UnitFrame frame = UnitFrame.of(stretch, units);
               Comparison comparison = new Comparison(calculation, real, sought.highest, frame);
               return new HandCheck(
                   what,

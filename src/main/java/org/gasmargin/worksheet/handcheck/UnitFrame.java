@@ -1,6 +1,7 @@
 package org.gasmargin.worksheet.handcheck;
 
 import java.util.List;
+import org.gasmargin.process.Stretch;
 import org.gasmargin.units.Dimension;
 import org.gasmargin.units.DisplayUnits;
 import org.gasmargin.worksheet.numbers.Digits;
@@ -18,27 +19,22 @@ final class UnitFrame {
   private final Rounded atmosphere;
   private final int pressureDecimals;
 
-  /**
-   * A frame that shows pressures well up to the largest of a check.
-   *
-   * @param largestPressure Pa absolute
-   */
-  UnitFrame(DisplayUnits units, double largestPressure) {
+  /** A frame with decimals that show the smallest pressure of a stretch with four digits. */
+  static UnitFrame of(Stretch stretch, DisplayUnits units) {
+    return new UnitFrame(units, Math.min(stretch.startPressure(), stretch.endPressure()));
+  }
+
+  private UnitFrame(DisplayUnits units, double smallestPressure) {
     temperature = Scale.of(Dimension.TEMPERATURE, units);
     pressure = Scale.of(Dimension.ABSOLUTE_PRESSURE, units);
-    double smallest = gauge() ? Math.min(units.atmosphere(), largestPressure) : largestPressure;
-    pressureDecimals = Digits.decimalsFor(pressure.slope() * smallest) + (gauge() ? 0 : 1);
+    double smallest = gauge() ? Math.min(units.atmosphere(), smallestPressure) : smallestPressure;
+    pressureDecimals = Digits.decimalsFor(pressure.slope() * smallest);
     atmosphere = Rounded.to(pressure.slope() * units.atmosphere(), pressureDecimals);
   }
 
   /** The symbol of absolute pressure. */
   String absoluteSymbol() {
     return gauge() ? pressure.symbol().replace("(g)", "(a)") : pressure.symbol();
-  }
-
-  /** The symbol of temperature as the user has it. */
-  String temperatureSymbol() {
-    return temperature.symbol();
   }
 
   /** An absolute pressure in the user's unit. */

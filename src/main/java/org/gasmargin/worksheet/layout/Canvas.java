@@ -28,12 +28,12 @@ public final class Canvas {
 
   /** The width that a text takes, pt. */
   public float width(String text, Style style) {
-    return fonts.width(fonts.drawable(text), style);
+    return fonts.width(fonts.oneLine(text), style);
   }
 
   /** Draws text of one line with its baseline at {@code y}. */
   public void text(String text, float x, float y, Style style, Anchor anchor) {
-    String drawable = fonts.drawable(text);
+    String drawable = fonts.oneLine(text);
     showsReplacement |= drawable.contains(Fonts.REPLACEMENT);
     float left =
         switch (anchor) {

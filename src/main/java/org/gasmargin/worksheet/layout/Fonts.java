@@ -51,6 +51,11 @@ public final class Fonts {
     return plain == text.length() ? text : replaceUndrawable(text);
   }
 
+  /** The same in one line: line feeds become blanks. */
+  public String oneLine(String text) {
+    return drawable(text).replace('\n', ' ');
+  }
+
   /** The characters that were replaced so far, in the form {@code U+4E2D}. */
   public List<String> missing() {
     return missing.stream().map(c -> String.format(Locale.ROOT, "U+%04X", c)).toList();

@@ -111,7 +111,7 @@ public final class Sheet implements AutoCloseable {
     destination.setLeft(0);
     destination.setTop((int) (PDRectangle.A4.getHeight() - y + 6));
     PDOutlineItem item = new PDOutlineItem();
-    item.setTitle(fonts.drawable(words));
+    item.setTitle(words);
     item.setDestination(destination);
     outline.addLast(item);
   }
@@ -155,7 +155,7 @@ public final class Sheet implements AutoCloseable {
   }
 
   private String shortened(String text, float width) {
-    String whole = fonts.drawable(text);
+    String whole = fonts.oneLine(text);
     if (fonts.width(whole, Style.SMALL) <= width) {
       return whole;
     }
@@ -168,8 +168,8 @@ public final class Sheet implements AutoCloseable {
 
   private void describe(Marks marks) throws IOException {
     document.setVersion(1.7f);
-    document.getDocumentInformation().setTitle(marks.title());
-    document.getDocumentInformation().setProducer(marks.producer());
+    document.getDocumentInformation().setTitle(Xmp.clean(marks.title()));
+    document.getDocumentInformation().setProducer(Xmp.clean(marks.producer()));
     PDDocumentCatalog catalog = document.getDocumentCatalog();
     catalog.setLanguage(marks.language());
     catalog.getCOSObject().setItem(COSName.STRUCT_TREE_ROOT, structure);

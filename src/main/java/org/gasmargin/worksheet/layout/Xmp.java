@@ -48,19 +48,17 @@ final class Xmp {
         .replace("@LANGUAGE@", escaped(language));
   }
 
-  private static String escaped(String text) {
+  /** The text without what metadata cannot hold: control characters and half characters. */
+  static String clean(String text) {
     StringBuilder result = new StringBuilder();
     text.codePoints()
-        .filter(c -> c >= ' ' && c != 0xfffe && c != 0xffff && (c < 0xd800 || c > 0xdfff))
-        .forEach(
-            c -> {
-              switch (c) {
-                case '&' -> result.append("&amp;");
-                case '<' -> result.append("&lt;");
-                case '>' -> result.append("&gt;");
-                default -> result.appendCodePoint(c);
-              }
-            });
+        .filter(c -> c >= ' ' && c != 0x7f && c != 0xfffe && c != 0xffff)
+        .filter(c -> c < 0xd800 || c > 0xdfff)
+        .forEach(result::appendCodePoint);
     return result.toString();
+  }
+
+  private static String escaped(String text) {
+    return clean(text).replace("&", "&amp;").replace("<", "&lt;").replace(">", "&gt;");
   }
 }

@@ -1,5 +1,7 @@
 package org.gasmargin.worksheet.numbers;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.Locale;
 
 /** Writes numbers with as many digits as a reader can use. */
@@ -21,7 +23,8 @@ public final class Digits {
     if (largest == 0) {
       return 1;
     }
-    int before = (int) Math.floor(Math.log10(largest)) + 1;
+    double rounded = new BigDecimal(largest).round(new MathContext(SIGNIFICANT)).doubleValue();
+    int before = (int) Math.floor(Math.log10(rounded)) + 1;
     return Math.max(0, Math.min(MOST_DECIMALS, SIGNIFICANT - before));
   }
 

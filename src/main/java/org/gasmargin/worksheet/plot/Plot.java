@@ -104,15 +104,38 @@ public record Plot(Axis x, Axis y, List<Curve> curves, List<LimitLine> limits)
     canvas.line(area.left(), at, area.right(), at, LIMIT);
   }
 
+  /** Labels stand above their line, or below it near the top, at the side with more room. */
   private void drawLimitLabels(Canvas canvas, Area area) {
     for (LimitLine limit : limits) {
-      double position = y.position(limit.value());
       float at = across(area, limit.value());
-      float baseline = position > 0.85 ? at + 8 : at - 2.5f;
+      float baseline = y.position(limit.value()) > 0.85 ? at + 8 : at - 2.5f;
       float labelWidth = canvas.width(limit.label(), LABEL);
-      canvas.fill(area.left() + 2, baseline - 6.5f, labelWidth + 2, 8, 1);
-      canvas.text(limit.label(), area.left() + 3, baseline, LABEL);
+      float left = area.left() + 3;
+      float right = area.right() - 3 - labelWidth;
+      float middle = baseline - 3;
+      boolean onTheLeft =
+          room(area, left, left + labelWidth, middle)
+              >= room(area, right, right + labelWidth, middle);
+      canvas.text(limit.label(), onTheLeft ? left : right, baseline, LABEL);
     }
+  }
+
+  /** How near the curves come to a height between two places, pt. */
+  private float room(Area area, float from, float to, float height) {
+    float least = area.height();
+    for (Curve curve : curves) {
+      for (int i = 1; i < curve.points().size(); i++) {
+        float x1 = along(area, curve.points().get(i - 1).x());
+        float x2 = along(area, curve.points().get(i).x());
+        if (Math.max(x1, x2) >= from && Math.min(x1, x2) <= to) {
+          float y1 = across(area, curve.points().get(i - 1).y()) - height;
+          float y2 = across(area, curve.points().get(i).y()) - height;
+          boolean crosses = y1 * y2 <= 0;
+          least = crosses ? 0 : Math.min(least, Math.min(Math.abs(y1), Math.abs(y2)));
+        }
+      }
+    }
+    return least;
   }
 
   private void drawCurve(Canvas canvas, Area area, Curve curve) {
