@@ -208,11 +208,8 @@ final class BandTable {
   private static List<Double> isentropes(Gas gas, double t1, double p1, double p2) {
     try {
       State first = gas.atTemperaturePressure(t1, p1);
-      State end = gas.atPressureEntropy(p2, first.entropy());
-      if (Math.abs(end.entropy() - first.entropy()) > 1e-6) {
-        return List.of();
-      }
-      return List.of(end.temperature() / IdealChange.temperature(t1, p2 / p1, gamma(gas, t1)));
+      double real = gas.atPressureEntropy(p2, first.entropy()).temperature();
+      return List.of(real / IdealChange.temperature(t1, p2 / p1, gamma(gas, t1)));
     } catch (OutsideValidity beyond) {
       return List.of();
     }
