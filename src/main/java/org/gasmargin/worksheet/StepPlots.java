@@ -3,6 +3,7 @@ package org.gasmargin.worksheet;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.ToDoubleFunction;
 import org.gasmargin.process.Path;
 import org.gasmargin.process.PathPoint;
@@ -81,10 +82,10 @@ final class StepPlots {
     if (longest > 0) {
       Quantity time =
           new Quantity("time", "t", Dimension.TIME, Durations.scaleFor(longest), PathPoint::time);
-      plots.add(figure(result, drawn, time, pressure));
-      plots.add(figure(result, drawn, time, temperature));
+      figure(result, drawn, time, pressure).ifPresent(plots::add);
+      figure(result, drawn, time, temperature).ifPresent(plots::add);
     } else {
-      plots.add(figure(result, drawn, pressure, temperature));
+      figure(result, drawn, pressure, temperature).ifPresent(plots::add);
     }
     new VolumePlot(content, result, pressure.scale()).figure(HEIGHT).ifPresent(plots::add);
     List<List<Block>> columns = new ArrayList<>();
@@ -94,7 +95,8 @@ final class StepPlots {
     return List.of(new Columns(columns, List.of(1 / 3f, 1 / 3f, 1 / 3f), 6));
   }
 
-  private Figure figure(StepResult result, List<Drawn> drawn, Quantity along, Quantity across) {
+  private Optional<Figure> figure(
+      StepResult result, List<Drawn> drawn, Quantity along, Quantity across) {
     List<Curve> curves = new ArrayList<>();
     double[] x = {Double.POSITIVE_INFINITY, Double.NEGATIVE_INFINITY};
     double[] y = {Double.POSITIVE_INFINITY, Double.NEGATIVE_INFINITY};
@@ -104,12 +106,20 @@ final class StepPlots {
       List<Curve.Point> points = new ArrayList<>();
       for (PathPoint point : one.path().points()) {
         Curve.Point shown = new Curve.Point(along.shown(point), across.shown(point));
-        points.add(shown);
-        widen(x, shown.x());
-        widen(y, shown.y());
+        if (Double.isFinite(shown.x()) && Double.isFinite(shown.y())) {
+          points.add(shown);
+          widen(x, shown.x());
+          widen(y, shown.y());
+        }
+      }
+      if (points.isEmpty()) {
+        continue;
       }
       curves.add(new Curve(one.look().letter(), one.look().stroke(), points));
       told.append(tell(one.look(), points, along, across));
+    }
+    if (curves.isEmpty()) {
+      return Optional.empty();
     }
     List<Limit> all = content.limits().getOrDefault(result.step().vessel(), List.of());
     List<Plot.LimitLine> limits =
@@ -123,8 +133,8 @@ final class StepPlots {
             ? Axis.fromZero(x[1], along.title())
             : Axis.linear(x[0], x[1], along.title());
     Axis vertical = Axis.linear(y[0], y[1], across.title());
-    return new Figure(
-        HEIGHT, told.append('.').toString(), new Plot(horizontal, vertical, curves, limits));
+    Plot plot = new Plot(horizontal, vertical, curves, limits);
+    return Optional.of(new Figure(HEIGHT, told.append('.').toString(), plot));
   }
 
   private static void widen(double[] range, double value) {

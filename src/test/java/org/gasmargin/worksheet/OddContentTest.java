@@ -6,20 +6,22 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.IOException;
 import java.util.ArrayList;
-import java.util.Collections;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import org.apache.pdfbox.Loader;
 import org.apache.pdfbox.pdmodel.PDDocument;
 import org.apache.pdfbox.text.PDFTextStripper;
 import org.apache.pdfbox.text.TextPosition;
+import org.gasmargin.process.Closure;
 import org.gasmargin.process.Envelope;
 import org.gasmargin.process.Extreme;
+import org.gasmargin.process.Path;
 import org.gasmargin.process.PathKind;
 import org.gasmargin.process.PathOutcome;
-import org.gasmargin.process.ProcedureResult;
+import org.gasmargin.process.PathPoint;
 import org.gasmargin.process.StepResult;
 import org.gasmargin.rules.Finding;
 import org.gasmargin.rules.JudgeOn;
@@ -55,7 +57,7 @@ class OddContentTest {
   void nothingLeavesThePage() throws IOException {
     String word = "Überlang".repeat(40);
     WorksheetContent content =
-        SampleJob.with(SampleJob.result(), manyFindings(100, word), JudgeOn.BOUNDS);
+        SampleJob.with(SampleJob.steps(), manyFindings(100, word), JudgeOn.BOUNDS);
     assertNothingOutside(SampleJob.titled(content, word + " " + "word ".repeat(60), word));
     assertNothingOutside(SampleJob.content());
     assertNothingOutside(unknown());
@@ -73,13 +75,43 @@ class OddContentTest {
   }
 
   @Test
+  void whatIsNoNumberIsADashAndNeverHolds() throws IOException {
+    OptionalDouble nan = OptionalDouble.of(Double.NaN);
+    List<PathPoint> points = new ArrayList<>();
+    for (int i = 0; i < 4; i++) {
+      points.add(new PathPoint(i, 1e5, 300, Double.NaN, 0, nan, nan));
+    }
+    StepResult sound = SampleJob.steps().get(1);
+    Map<PathKind, PathOutcome> paths = new EnumMap<>(sound.paths());
+    paths.put(
+        PathKind.MODELLED,
+        new PathOutcome.Computed(new Path(points, 300, 300, 1e5, 1e5, nan, nan)));
+    StepResult odd =
+        new StepResult(
+            sound.step(),
+            paths,
+            sound.envelope(),
+            Optional.empty(),
+            Optional.of(new Closure(0, Double.NaN)),
+            Optional.empty(),
+            List.of(),
+            List.of(),
+            Optional.empty());
+    String text =
+        PdfText.text(
+            SampleJob.with(List.of(odd), List.of(SampleFindings.missingLimit()), JudgeOn.BOUNDS));
+    assertFalse(text.contains("NaN"), text);
+    assertTrue(text.contains("Step 2 0 – 1.000×10⁻⁸ DOES NOT HOLD: not assessed"), text);
+  }
+
+  @Test
   void hugeAndTinyNumbersStayReadable() throws IOException {
     List<Finding> findings =
         List.of(
             number(Verdict.OVER_LIMIT, 4.2e21, 3e21, -1.2e21),
             number(Verdict.WITHIN_LIMITS, 3.1e-9, 5.5e-9, 2.4e-9),
             number(Verdict.WITHIN_LIMITS, 0, 0, 0));
-    String text = PdfText.text(SampleJob.with(SampleJob.result(), findings, JudgeOn.BOUNDS));
+    String text = PdfText.text(SampleJob.with(SampleJob.steps(), findings, JudgeOn.BOUNDS));
     assertTrue(text.contains("4.200×10²¹ 3.000×10²¹"), text);
     assertTrue(text.contains("3.100×10⁻⁹ 5.500×10⁻⁹"), text);
   }
@@ -90,9 +122,8 @@ class OddContentTest {
     for (int i = 0; i < 17; i++) {
       steps.addAll(SampleJob.result().steps());
     }
-    ProcedureResult result = new ProcedureResult(SampleJob.result().procedure(), steps);
     WorksheetContent content =
-        SampleJob.with(result, SampleFindings.all(SampleJob.result()), JudgeOn.BOUNDS);
+        SampleJob.with(steps, SampleFindings.all(SampleJob.result()), JudgeOn.BOUNDS);
     assertNothingOutside(content);
     String text = PdfText.text(content);
     assertEquals(18, text.split("Step 1: fill receiver", -1).length);
@@ -162,9 +193,7 @@ class OddContentTest {
             List.of(),
             List.of("nothing could be computed"),
             Optional.empty());
-    ProcedureResult result =
-        new ProcedureResult(SampleJob.result().procedure(), Collections.nCopies(1, step));
-    return SampleJob.with(result, List.of(SampleFindings.missingLimit()), JudgeOn.BOUNDS);
+    return SampleJob.with(List.of(step), List.of(SampleFindings.missingLimit()), JudgeOn.BOUNDS);
   }
 
   private static void assertNothingOutside(WorksheetContent content) throws IOException {

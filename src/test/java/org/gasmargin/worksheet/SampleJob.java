@@ -54,26 +54,34 @@ final class SampleJob {
   private SampleJob() {}
 
   static WorksheetContent content() {
-    return with(RESULT, SampleFindings.all(RESULT), JudgeOn.BOUNDS);
+    return with(steps(), SampleFindings.all(RESULT), JudgeOn.BOUNDS);
   }
 
   static WorksheetContent credited() {
-    List<StepResult> steps = RESULT.steps().stream().map(SampleJob::credited).toList();
-    ProcedureResult result = new ProcedureResult(RESULT.procedure(), steps);
-    return with(result, SampleFindings.all(result), JudgeOn.MODELLED);
+    List<StepResult> steps = steps().stream().map(SampleJob::credited).toList();
+    return with(steps, SampleFindings.all(RESULT), JudgeOn.MODELLED);
   }
 
   static ProcedureResult result() {
     return RESULT;
   }
 
-  static WorksheetContent with(ProcedureResult result, List<Finding> findings, JudgeOn judgeOn) {
+  static List<StepResult> steps() {
+    return RESULT.steps();
+  }
+
+  static WorksheetContent with(List<StepResult> steps, List<Finding> findings, JudgeOn judgeOn) {
+    return with("Top-up of a ring-main receiver", steps, findings, judgeOn);
+  }
+
+  static WorksheetContent with(
+      String title, List<StepResult> steps, List<Finding> findings, JudgeOn judgeOn) {
     return new WorksheetContent(
-        "Top-up of a ring-main receiver",
+        title,
         "J-0142",
         "A",
         "",
-        result,
+        new ProcedureResult(RESULT.procedure(), steps),
         Map.of("receiver", limits()),
         new Judgement(
             judgeOn,

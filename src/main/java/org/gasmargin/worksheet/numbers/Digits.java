@@ -7,6 +7,7 @@ import java.util.Locale;
 /** Writes numbers with as many digits as a reader can use. */
 public final class Digits {
   private static final String SUPERSCRIPTS = "⁰¹²³⁴⁵⁶⁷⁸⁹";
+  private static final String UNKNOWN = "–";
   private static final int SIGNIFICANT = 4;
   private static final int MOST_DECIMALS = 6;
   private static final double LARGE = 1e7;
@@ -20,7 +21,7 @@ public final class Digits {
     for (double value : values) {
       largest = Math.max(largest, Math.abs(value));
     }
-    if (largest == 0) {
+    if (!(largest > 0 && Double.isFinite(largest))) {
       return 1;
     }
     double rounded = new BigDecimal(largest).round(new MathContext(SIGNIFICANT)).doubleValue();
@@ -63,6 +64,9 @@ public final class Digits {
    * the decimals would not show it.
    */
   public static String of(double value, int decimals) {
+    if (!Double.isFinite(value)) {
+      return UNKNOWN;
+    }
     double size = Math.abs(value);
     if (size >= LARGE || (size > 0 && size < SMALL)) {
       return power(value);
@@ -81,6 +85,9 @@ public final class Digits {
   public static String power(double value) {
     if (value == 0) {
       return "0";
+    }
+    if (!Double.isFinite(value)) {
+      return UNKNOWN;
     }
     String[] parts = String.format(Locale.ROOT, "%.3e", value).split("e", 2);
     StringBuilder exponent = new StringBuilder();

@@ -11,9 +11,12 @@ import org.gasmargin.worksheet.layout.Stroke;
  * @param points in drawing order, in the units of the axes
  */
 public record Curve(String label, Stroke stroke, List<Point> points) {
-  /** Copies the list. */
+  /** Copies the points, leaving out those that are no numbers. */
   public Curve {
-    points = List.copyOf(points);
+    points =
+        points.stream()
+            .filter(point -> Double.isFinite(point.x()) && Double.isFinite(point.y()))
+            .toList();
   }
 
   /** A point in the units of the axes. */

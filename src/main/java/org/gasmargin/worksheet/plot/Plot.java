@@ -26,9 +26,9 @@ public record Plot(Axis x, Axis y, List<Curve> curves, List<LimitLine> limits)
   private static final Stroke GRID = Stroke.solid(0.3f, 0.85f);
   private static final Stroke LIMIT = Stroke.dashed(1f, 7f, 1.5f, 1.5f, 1.5f);
 
-  /** Copies the lists. */
+  /** Copies the lists without curves that have no points. */
   public Plot {
-    curves = List.copyOf(curves);
+    curves = curves.stream().filter(curve -> !curve.points().isEmpty()).toList();
     limits = List.copyOf(limits);
   }
 
