@@ -16,17 +16,23 @@ public final class Bands {
   /** Where the table stands among the resources. */
   public static final String RESOURCE = "/handcheck/bands.csv";
 
+  static final String CHARGE = "charge";
+  static final String MASS_CHARGE = "mass_charge";
+  static final String VENT = "vent";
+  static final String COMPRESSION = "compression";
+  static final String ISOCHORE = "isochore";
+
   private Bands() {}
 
   /**
    * What a band is looked up by.
    *
-   * @param process charge, vent, compression or isochore
+   * @param process charge, mass_charge, vent, compression or isochore
    * @param gas identifier
-   * @param pressure Pa absolute: of the supply; at the start of a vent or isochore; at the end of a
-   *     compression
+   * @param pressure Pa absolute: of the supply of a charge; at the start of a vent or isochore; at
+   *     the end of a compression; the ideal end pressure of a known mass charged
    * @param ratio above 1 for pressures: end over start, start over end for a vent; of temperatures,
-   *     end over start, for an isochore
+   *     end over start, for an isochore; of ideal masses, end over start, for a known mass charged
    * @param temperature K: of the supply, otherwise at the start
    * @param part end pressure over the pressure of the supply of a charge; 1 otherwise
    */

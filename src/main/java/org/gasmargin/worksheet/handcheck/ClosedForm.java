@@ -50,7 +50,7 @@ final class ClosedForm {
         lines,
         end.value(),
         new Bands.Key(
-            "charge",
+            Bands.CHARGE,
             gas.id(),
             supplyPressure,
             stretch.endPressure() / stretch.startPressure(),
@@ -65,7 +65,7 @@ final class ClosedForm {
         "Gas left behind in a vent without heat exchange: T₂ = T₁ (p₂/p₁)^((γ−1)/γ)",
         true,
         new Bands.Key(
-            "vent", gas.id(), stretch.startPressure(), ratio, stretch.startTemperature(), 1));
+            Bands.VENT, gas.id(), stretch.startPressure(), ratio, stretch.startTemperature(), 1));
   }
 
   /** The isentrope of trapped gas, compressed without mixing. */
@@ -75,7 +75,12 @@ final class ClosedForm {
         "Trapped gas compressed without heat exchange: T₂ = T₁ (p₂/p₁)^((γ−1)/γ)",
         false,
         new Bands.Key(
-            "compression", gas.id(), stretch.endPressure(), ratio, stretch.startTemperature(), 1));
+            Bands.COMPRESSION,
+            gas.id(),
+            stretch.endPressure(),
+            ratio,
+            stretch.startTemperature(),
+            1));
   }
 
   /** Constant volume and amount. */
@@ -91,7 +96,7 @@ final class ClosedForm {
         lines,
         frame.pascal(p2.value()),
         new Bands.Key(
-            "isochore",
+            Bands.ISOCHORE,
             gas.id(),
             stretch.startPressure(),
             stretch.endTemperature() / stretch.startTemperature(),

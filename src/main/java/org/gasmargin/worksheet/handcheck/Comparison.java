@@ -3,6 +3,7 @@ package org.gasmargin.worksheet.handcheck;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import org.gasmargin.worksheet.numbers.Digits;
 
 /**
@@ -14,6 +15,8 @@ import org.gasmargin.worksheet.numbers.Digits;
  * @param frame units
  */
 record Comparison(Calculation calculation, double real, boolean highest, UnitFrame frame) {
+
+  private static final Set<String> PRESSURES = Set.of(Bands.ISOCHORE, Bands.MASS_CHARGE);
 
   /** Whether the real value lies in the band; empty if there is no band. */
   Optional<Boolean> agreement() {
@@ -68,24 +71,30 @@ record Comparison(Calculation calculation, double real, boolean highest, UnitFra
   private String why() {
     boolean idealHigh = calculation.ideal() > real;
     return switch (calculation.band().process()) {
-      case "charge" ->
+      case Bands.CHARGE ->
           idealHigh
               ? "The real gas cools as it is throttled into the vessel and its heat capacity grows"
                   + " with pressure and temperature; the formula knows neither."
               : "The real gas warms as it is throttled into the vessel (it is above its inversion"
                   + " temperature); the formula does not know that.";
-      case "compression" ->
+      case Bands.COMPRESSION ->
           idealHigh
               ? "The heat capacity of the real gas grows as it gets hot; the formula keeps it"
                   + " constant."
               : "At these densities the molecules of the real gas take more work to compress than"
                   + " the formula counts.";
-      case "vent" ->
+      case Bands.VENT ->
           idealHigh
               ? "The real gas also works against the attraction of its molecules, or its heat"
                   + " capacity falls as it cools; the formula knows neither."
               : "The real gas has a larger heat capacity at these densities than the formula's"
                   + " constant one.";
+      case Bands.MASS_CHARGE ->
+          idealHigh
+              ? "The attraction of the molecules holds the pressure of the real gas down, or the gas"
+                  + " cools as it is throttled; the formula knows neither."
+              : "The molecules of the real gas take up room at these densities, or the gas warms as"
+                  + " it is throttled; the formula knows neither.";
       default ->
           idealHigh == calculation.band().ratio() > 1
               ? "The molecules of the real gas take up room, which counts less at the higher"
@@ -133,7 +142,7 @@ record Comparison(Calculation calculation, double real, boolean highest, UnitFra
   }
 
   private boolean isPressure() {
-    return calculation.band().process().equals("isochore");
+    return PRESSURES.contains(calculation.band().process());
   }
 
   private String text(double value) {

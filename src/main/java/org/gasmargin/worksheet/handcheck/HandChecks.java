@@ -2,7 +2,7 @@ package org.gasmargin.worksheet.handcheck;
 
 import java.util.List;
 import java.util.Optional;
-import org.gasmargin.gas.Gas;
+import org.gasmargin.process.Drive;
 import org.gasmargin.process.Envelope;
 import org.gasmargin.process.Extreme;
 import org.gasmargin.process.Path;
@@ -15,6 +15,7 @@ import org.gasmargin.process.Stretch;
 import org.gasmargin.rules.Finding;
 import org.gasmargin.units.DisplayUnits;
 import org.gasmargin.units.Interval;
+import org.gasmargin.vessel.Vessel;
 
 /** Finds the closed form that redoes a number. */
 public final class HandChecks {
@@ -67,7 +68,8 @@ public final class HandChecks {
               .or(() -> adiabaticBound(step, finding));
       case ABSOLUTE_PRESSURE ->
           check(step, envelope.highestPressure(), predicted, Sought.HIGHEST_PRESSURE)
-              .or(() -> check(step, envelope.lowestPressure(), predicted, Sought.LOWEST_PRESSURE));
+              .or(() -> check(step, envelope.lowestPressure(), predicted, Sought.LOWEST_PRESSURE))
+              .or(() -> contentPressure(step, finding, predicted));
       default -> Optional.empty();
     };
   }
@@ -125,6 +127,24 @@ public final class HandChecks {
     return check(step, stretch, last.temperature(), sought, what);
   }
 
+  /** The pressure that the content takes on at a temperature, from the end of a fill. */
+  private Optional<HandCheck> contentPressure(StepResult step, Finding finding, double predicted) {
+    return FilledContent.of(finding.quantity(), step, vessel(step.step()).gas())
+        .flatMap(
+            content -> {
+              Stretch stretch =
+                  new Stretch(
+                      content.pressure(),
+                      content.temperature(),
+                      predicted,
+                      content.settled(),
+                      true);
+              Sought sought = content.most() ? Sought.HIGHEST_PRESSURE : Sought.LOWEST_PRESSURE;
+              String what = "Step " + step.step().id() + ", " + finding.quantity();
+              return check(step, stretch, predicted, sought, what);
+            });
+  }
+
   private Optional<HandCheck> check(
       StepResult step, Stretch stretch, double real, Sought sought, String what) {
     return calculation(step.step(), stretch, sought)
@@ -142,9 +162,14 @@ public final class HandChecks {
   }
 
   private Optional<Calculation> calculation(Step step, Stretch stretch, Sought sought) {
-    ClosedForm form = new ClosedForm(gas(step), stretch, units);
+    ClosedForm form = new ClosedForm(vessel(step).gas(), stretch, units);
     if (stretch.settling()) {
       return sought.isPressure() ? Optional.of(form.isochore()) : Optional.empty();
+    }
+    if (sought == Sought.HIGHEST_PRESSURE
+        && step instanceof Step.Fill fill
+        && fill.drive() instanceof Drive.MassFlow flow) {
+      return Optional.of(new MassCharge(vessel(step), stretch, units).highestPressure(fill, flow));
     }
     boolean still = Math.abs(stretch.endPressure() / stretch.startPressure() - 1) < UNMOVED;
     if (still || sought.isPressure()) {
@@ -161,11 +186,10 @@ public final class HandChecks {
     return step instanceof Step.Vent ? Optional.of(form.vent()) : Optional.empty();
   }
 
-  private Gas gas(Step step) {
+  private Vessel vessel(Step step) {
     return result.procedure().vessels().stream()
         .filter(vessel -> vessel.name().equals(step.vessel()))
         .findFirst()
-        .orElseThrow()
-        .gas();
+        .orElseThrow();
   }
 }

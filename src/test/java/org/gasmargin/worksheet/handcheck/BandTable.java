@@ -25,12 +25,13 @@ final class BandTable {
   private static final double[] RATIOS = {1.02, 2, 5, 20, 1100};
   private static final double[] CHARGE_RATIOS = {1.02, 3, 10, 1100};
   private static final double[] END_PARTS = {0.1, 0.3, 0.6, 1};
+  private static final double[] SUPPLY_OVER_END = {1, 1.7, 3};
   private static final double[] ANY_PART = {0, 1};
   private static final double[] SUPPLY_TEMPERATURES = {233.15, 273.15, 303.15, 343.15};
-  private static final double[] VENT_TEMPERATURES = {233.15, 293.15, 353.15, 473.15};
+  private static final double[] VENT_TEMPERATURES = {233.15, 293.15, 353.15, 473.15, 573.15};
   private static final double[] TRAPPED_TEMPERATURES = {233.15, 343.15};
-  private static final double[] WARMING = {0.6, 0.8, 0.98, 1.02, 1.2, 1.6};
-  private static final double[] SETTLING_TEMPERATURES = {233.15, 293.15, 353.15, 473.15};
+  private static final double[] WARMING = {0.5, 0.65, 0.8, 0.98, 1.02, 1.2, 1.6};
+  private static final double[] SETTLING_TEMPERATURES = {233.15, 293.15, 353.15, 473.15, 573.15};
   private static final double[] START_TEMPERATURES = {233.15, 288.15, 343.15};
   private static final int COARSE = 3;
   private static final int FINE = 7;
@@ -62,6 +63,8 @@ final class BandTable {
         double[] parts = {END_PARTS[part - 1], END_PARTS[part]};
         table.ranges(gas, "charge", CHARGE_RATIOS, SUPPLY_TEMPERATURES, parts, BandTable::charges);
       }
+      table.ranges(
+          gas, "mass_charge", CHARGE_RATIOS, SUPPLY_TEMPERATURES, ANY_PART, BandTable::massCharges);
       table.ranges(gas, "vent", RATIOS, VENT_TEMPERATURES, ANY_PART, BandTable::vents);
       table.ranges(
           gas, "compression", RATIOS, TRAPPED_TEMPERATURES, ANY_PART, BandTable::compressions);
@@ -92,7 +95,7 @@ final class BandTable {
       for (int r = 1; r < ratios.length; r++) {
         for (int t = 1; t < temperatures.length; t++) {
           List<Double> values = new ArrayList<>();
-          int points = process.equals("charge") ? COARSE : FINE;
+          int points = process.endsWith("charge") ? COARSE : FINE;
           for (double pressure : between(PRESSURES[p - 1], PRESSURES[p], points)) {
             for (double ratio : between(ratios[r - 1], ratios[r], points)) {
               for (double temperature : between(temperatures[t - 1], temperatures[t], points)) {
@@ -195,6 +198,36 @@ final class BandTable {
   private static double excess(Gas gas, double temperature, double pressure, double enthalpy) {
     State state = gas.atTemperaturePressure(temperature, pressure);
     return state.molarDensity() * (state.internalEnergy() - enthalpy);
+  }
+
+  /** The pressure of the case is the ideal end pressure, its ratio that of the ideal masses. */
+  private static List<Double> massCharges(Gas gas, Case one) {
+    List<Double> values = new ArrayList<>();
+    for (double start : START_TEMPERATURES) {
+      for (double excess : SUPPLY_OVER_END) {
+        values.addAll(massCharge(gas, one, start, one.pressure() * excess));
+      }
+    }
+    return values;
+  }
+
+  private static List<Double> massCharge(Gas gas, Case one, double start, double supply) {
+    double ideal =
+        RigidVessel.chargedTemperatureByMass(
+            gamma(gas, start), one.temperature(), start, one.ratio());
+    double p1 = one.pressure() * start / ideal / one.ratio();
+    double idealDensity = p1 / (Gas.MOLAR_GAS_CONSTANT * start);
+    try {
+      double enthalpy = gas.atTemperaturePressure(one.temperature(), supply).enthalpy();
+      State first = gas.atTemperaturePressure(start, p1);
+      double density = first.molarDensity() + (one.ratio() - 1) * idealDensity;
+      double energy =
+          enthalpy + first.molarDensity() * (first.internalEnergy() - enthalpy) / density;
+      double real = gas.atDensityEnergy(density, energy, ideal).pressure();
+      return List.of(real / one.pressure());
+    } catch (OutsideValidity beyond) {
+      return List.of();
+    }
   }
 
   private static List<Double> vents(Gas gas, Case one) {
