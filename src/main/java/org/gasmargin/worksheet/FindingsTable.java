@@ -112,7 +112,7 @@ final class FindingsTable {
     String vessel = alone ? "" : finding.vessel() + ": ";
     return Cell.of(
         new Run(Prose.tidy(vessel + finding.title()), Style.TABLE.strong()),
-        new Run("  " + finding.rule(), Style.SMALL));
+        new Run("  " + finding.rule() + ", " + finding.severity().key(), Style.SMALL));
   }
 
   private Run[] details(FindingGroup group) {

@@ -22,11 +22,14 @@ final class Governing {
         .toList();
   }
 
-  /** All findings, worst verdict first, then by how much of the way to the limit is used. */
+  /** All findings, worst first, among equals by how much of the way to the limit is used. */
   List<Finding> ranked() {
     return content.judgement().findings().stream()
         .sorted(
-            Comparator.comparing(Finding::verdict).thenComparingDouble(this::reached).reversed())
+            Comparator.comparing(Finding::verdict)
+                .reversed()
+                .thenComparing(Finding::severity)
+                .thenComparing(Comparator.comparingDouble(this::reached).reversed()))
         .toList();
   }
 

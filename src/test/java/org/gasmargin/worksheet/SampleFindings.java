@@ -7,6 +7,7 @@ import org.gasmargin.process.Envelope;
 import org.gasmargin.process.Extreme;
 import org.gasmargin.process.ProcedureResult;
 import org.gasmargin.rules.Finding;
+import org.gasmargin.rules.Severity;
 import org.gasmargin.rules.Verdict;
 import org.gasmargin.units.Dimension;
 
@@ -88,6 +89,7 @@ final class SampleFindings {
         "1",
         "receiver",
         Verdict.NOT_ASSESSED,
+        Severity.DAMAGE,
         "highest metal temperature",
         Dimension.TEMPERATURE,
         OptionalDouble.of(391.2),
@@ -120,6 +122,7 @@ final class SampleFindings {
         step,
         "receiver",
         verdict,
+        Severity.DAMAGE,
         quantity,
         dimension,
         OptionalDouble.of(predicted.value()),

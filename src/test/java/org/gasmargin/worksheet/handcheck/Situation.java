@@ -17,6 +17,7 @@ import org.gasmargin.process.Supply;
 import org.gasmargin.process.bounds.BoundStep;
 import org.gasmargin.process.bounds.BoundTrack;
 import org.gasmargin.rules.Finding;
+import org.gasmargin.rules.Severity;
 import org.gasmargin.rules.Verdict;
 import org.gasmargin.units.Dimension;
 import org.gasmargin.units.DisplayUnits;
@@ -126,6 +127,7 @@ enum Situation {
         step.id(),
         "v",
         Verdict.OVER_LIMIT,
+        Severity.DAMAGE,
         quantity,
         dimension,
         OptionalDouble.of(predicted),
