@@ -17,10 +17,10 @@ public final class JetAndNaturalConvection implements FilmLaw {
   private static final double JET_FACTOR = 0.56;
 
   /**
-   * Re_d, a tenth of the lowest of the correlation, below which the jet's part falls in proportion:
-   * less than the power law, so less heat is credited, and without its infinite slope at rest.
+   * Re_d, the lowest of the correlation, below which the jet's part falls in proportion: less than
+   * the power law, so less heat is credited, and without its infinite slope at rest.
    */
-  private static final double WEAK_JET = 1e3;
+  private static final double WEAK_JET = Numbers.MIN_REYNOLDS;
 
   private static final double JET_EXPONENT = 0.67;
   private static final double NATURAL_FACTOR = 0.104;

@@ -7,9 +7,16 @@ import org.gasmargin.vessel.Correlation;
 import org.gasmargin.vessel.JetAndNaturalConvection;
 import org.gasmargin.vessel.JetAndNaturalConvection.Numbers;
 
-/** Says where a path leaves the range of the correlation for the film inside. */
-final class FilmNotes {
-  private FilmNotes() {}
+/**
+ * Where a path leaves the range of the correlation for the film inside.
+ *
+ * @param notes in plain words
+ * @param extrapolated whether it goes above the range, so that more heat is credited than was ever
+ *     measured; below the range the correlation credits little
+ */
+record FilmNotes(List<String> notes, boolean extrapolated) {
+  /** A given film coefficient has no range. */
+  static final FilmNotes NONE = new FilmNotes(List.of(), false);
 
   /**
    * The notes of a path.
@@ -19,7 +26,7 @@ final class FilmNotes {
    * @param filling whether gas flows in
    * @param molarMass kg/mol
    */
-  static List<String> of(
+  static FilmNotes of(
       JetAndNaturalConvection film,
       List<PathRecorder.Sample> samples,
       boolean filling,
@@ -45,7 +52,9 @@ final class FilmNotes {
     }
     reynolds.note("Re_d", Numbers.MIN_REYNOLDS, Numbers.MAX_REYNOLDS, notes);
     rayleigh.note("Ra_D", Numbers.MIN_RAYLEIGH, Numbers.MAX_RAYLEIGH, notes);
-    return notes;
+    boolean extrapolated =
+        reynolds.highest > Numbers.MAX_REYNOLDS || rayleigh.highest > Numbers.MAX_RAYLEIGH;
+    return new FilmNotes(notes, extrapolated);
   }
 
   /** Lowest and highest value of a dimensionless number. */

@@ -16,13 +16,15 @@ import org.gasmargin.process.PathOutcome;
  * @param closure balances of the path, if there is one
  * @param events in rising time
  * @param notes in plain words
+ * @param extrapolated whether the film inside was taken above the range of its correlation
  */
 public record ModelledStep(
     PathOutcome outcome,
     Optional<VesselCondition> end,
     Optional<Closure> closure,
     List<Event> events,
-    List<String> notes) {
+    List<String> notes,
+    boolean extrapolated) {
 
   /** Copies the lists. */
   public ModelledStep {
@@ -34,11 +36,12 @@ public record ModelledStep(
   ModelledStep withNote(Optional<String> note) {
     List<String> more = new ArrayList<>(notes);
     note.ifPresent(more::add);
-    return new ModelledStep(outcome, end, closure, events, more);
+    return new ModelledStep(outcome, end, closure, events, more, extrapolated);
   }
 
   /** A step without a path. */
-  static ModelledStep without(PathOutcome outcome) {
-    return new ModelledStep(outcome, Optional.empty(), Optional.empty(), List.of(), List.of());
+  public static ModelledStep without(PathOutcome outcome) {
+    return new ModelledStep(
+        outcome, Optional.empty(), Optional.empty(), List.of(), List.of(), false);
   }
 }

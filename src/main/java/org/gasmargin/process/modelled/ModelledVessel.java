@@ -193,16 +193,17 @@ public final class ModelledVessel {
   }
 
   private ModelledStep result(JoinedPhases phases, FilmLaw film, boolean fills) {
-    List<String> notes =
+    FilmNotes range =
         film instanceof JetAndNaturalConvection correlation
             ? FilmNotes.of(correlation, phases.samples(), fills, vessel.gas().molarMass())
-            : List.of();
+            : FilmNotes.NONE;
     return new ModelledStep(
         new PathOutcome.Computed(phases.path()),
         phases.last().recorder().end(),
         Optional.of(phases.closure()),
         phases.events(),
-        notes);
+        range.notes(),
+        range.extrapolated());
   }
 
   /** A step that is over before it starts: one point and the same condition. */
@@ -218,7 +219,8 @@ public final class ModelledVessel {
         Optional.of(start),
         Optional.of(new Closure(0, 0)),
         List.of(),
-        List.of(note));
+        List.of(note),
+        false);
   }
 
   private GasWallSystem system(StepPlan.Integration plan, FilmLaw film, WallSide wall) {

@@ -15,6 +15,7 @@ import org.gasmargin.process.Procedure;
 import org.gasmargin.process.Step;
 import org.gasmargin.process.StepResult;
 import org.gasmargin.process.modelled.ModelInputs;
+import org.gasmargin.process.modelled.ModelledStep;
 import org.gasmargin.process.modelled.UncertainInput;
 import org.gasmargin.vessel.Correlation;
 import org.gasmargin.vessel.InsideFilm;
@@ -31,8 +32,8 @@ final class CreditedPath {
   private final List<Step> steps;
   private final Set<UncertainInput> uncertain = EnumSet.noneOf(UncertainInput.class);
 
-  /** One outcome a step, for each run. */
-  private final List<List<PathOutcome>> runs = new ArrayList<>();
+  /** One result a step, for each run. */
+  private final List<List<ModelledStep>> runs = new ArrayList<>();
 
   private CreditedPath(Vessel vessel, Procedure procedure) {
     this.vessel = vessel;
@@ -44,9 +45,12 @@ final class CreditedPath {
     }
   }
 
-  /** Runs all variants of a vessel's steps. */
+  /** Runs all variants of a vessel's steps; none if vessels wait for each other. */
   static CreditedPath of(Vessel vessel, Procedure procedure) {
     CreditedPath credited = new CreditedPath(vessel, procedure);
+    if (procedure.vessels().size() > 1) {
+      return credited;
+    }
     credited.run(ModelInputs.NOMINAL);
     List<Effect> effects = new ArrayList<>();
     for (UncertainInput input : credited.uncertain) {
@@ -61,7 +65,7 @@ final class CreditedPath {
   }
 
   /** What moving one input to its ends does. */
-  private record Effect(UncertainInput input, List<PathOutcome> low, List<PathOutcome> high) {
+  private record Effect(UncertainInput input, List<ModelledStep> low, List<ModelledStep> high) {
 
     /** The end that makes an extreme of a step worse: -1, 1, or 0 if neither does. */
     double worseEnd(int step, ModelledExtreme extreme) {
@@ -92,11 +96,11 @@ final class CreditedPath {
     return corners;
   }
 
-  private List<PathOutcome> run(ModelInputs inputs) {
+  private List<ModelledStep> run(ModelInputs inputs) {
     ModelledTrack track = new ModelledTrack(vessel, procedure.site(), inputs);
-    List<PathOutcome> outcomes = steps.stream().map(step -> track.run(step).outcome()).toList();
-    runs.add(outcomes);
-    return outcomes;
+    List<ModelledStep> results = steps.stream().map(track::run).toList();
+    runs.add(results);
+    return results;
   }
 
   /**
@@ -106,15 +110,17 @@ final class CreditedPath {
    * @param note takes the reason
    */
   Optional<StepResult.Credited> extremes(Step step, Consumer<String> note) {
+    if (runs.isEmpty()) {
+      note.accept(
+          "heat taken by the wall cannot be credited in a job of several vessels: how long each"
+              + " waits for the others is not varied");
+      return Optional.empty();
+    }
     int index = steps.indexOf(step);
-    for (List<PathOutcome> run : runs) {
-      PathOutcome outcome = run.get(index);
-      if (!(outcome instanceof PathOutcome.Computed)) {
-        note.accept(
-            "the uncertainty of the modelled path is unknown: "
-                + (outcome instanceof PathOutcome.Failed failed
-                    ? failed.reason()
-                    : ((PathOutcome.Absent) outcome).reason()));
+    for (List<ModelledStep> run : runs) {
+      Optional<String> obstacle = obstacle(run.get(index));
+      if (obstacle.isPresent()) {
+        note.accept("heat taken by the wall cannot be credited: " + obstacle.get());
         return Optional.empty();
       }
     }
@@ -129,6 +135,18 @@ final class CreditedPath {
             allowance()));
   }
 
+  private static Optional<String> obstacle(ModelledStep step) {
+    if (step.extrapolated()) {
+      return Optional.of("the film inside lies above the range of its correlation");
+    }
+    if (step.outcome() instanceof PathOutcome.Failed failed) {
+      return Optional.of(failed.reason());
+    }
+    return step.outcome() instanceof PathOutcome.Absent absent
+        ? Optional.of(absent.reason())
+        : Optional.empty();
+  }
+
   private OptionalDouble worst(int step, ModelledExtreme extreme) {
     return runs.stream()
         .map(run -> value(run.get(step), extreme))
@@ -136,8 +154,8 @@ final class CreditedPath {
         .reduce(extreme::worse);
   }
 
-  private static OptionalDouble value(PathOutcome outcome, ModelledExtreme extreme) {
-    if (outcome instanceof PathOutcome.Computed computed) {
+  private static OptionalDouble value(ModelledStep step, ModelledExtreme extreme) {
+    if (step.outcome() instanceof PathOutcome.Computed computed) {
       Path path = computed.path();
       return extreme.of(path);
     }

@@ -1,6 +1,5 @@
 package org.gasmargin.process.simulation;
 
-import java.util.List;
 import java.util.Optional;
 import org.gasmargin.gas.OutsideValidity;
 import org.gasmargin.process.Path;
@@ -63,8 +62,7 @@ final class ModelledTrack {
   /** Runs a step in sequence, without a clock. */
   ModelledStep run(Step step) {
     if (condition.isEmpty()) {
-      return new ModelledStep(
-          new PathOutcome.Failed(lost), Optional.empty(), Optional.empty(), List.of(), List.of());
+      return ModelledStep.without(new PathOutcome.Failed(lost));
     }
     ModelledStep result = vessel.run(step, condition.get());
     condition = result.end();

@@ -131,4 +131,60 @@ class SimulatorTest {
     assertTrue(step.closure().orElseThrow().holds());
     assertTrue(step.envelope().highestGasTemperature().isPresent());
   }
+
+  @Test
+  void heatIsNotCreditedInAJobOfSeveralVessels() {
+    List<StepResult> steps =
+        new Simulator()
+            .simulate(
+                new Procedure(
+                    SITE,
+                    List.of(vessel("a", true), vessel("b", true)),
+                    List.of(fill("1", "a", 60), fill("2", "b", 60))),
+                Credit.MODELLED)
+            .steps();
+    for (StepResult step : steps) {
+      assertTrue(step.credited().isEmpty());
+      assertTrue(
+          step.notes().stream().anyMatch(note -> note.contains("several vessels")),
+          step.notes().toString());
+    }
+  }
+
+  @Test
+  void heatIsNotCreditedAboveTheRangeOfTheCorrelation() {
+    Vessel given = vessel("v", true);
+    Wall wall = given.wall().orElseThrow();
+    Vessel correlated =
+        new Vessel(
+            "v",
+            NITROGEN,
+            given.volume(),
+            given.startPressure(),
+            given.startTemperature(),
+            given.startWallTemperature(),
+            Optional.of(
+                new Wall(
+                    new WallShape.Cylinder(0.23, 1.2, true),
+                    wall.layers(),
+                    new InsideFilm.Correlation(),
+                    wall.outside())));
+    StepResult gentle = jet(correlated, 600);
+    assertTrue(gentle.credited().isPresent(), gentle.notes().toString());
+    StepResult fierce = jet(correlated, 4);
+    assertTrue(fierce.credited().isEmpty());
+    assertTrue(
+        fierce.notes().stream().anyMatch(note -> note.contains("cannot be credited")),
+        fierce.notes().toString());
+  }
+
+  /** A fill through a bore of 6 mm. */
+  private static StepResult jet(Vessel vessel, double within) {
+    Step.Fill plain = (Step.Fill) fill("1", "v", within);
+    Step step = new Step.Fill("1", "v", plain.supply(), plain.drive(), OptionalDouble.of(0.006));
+    return new Simulator()
+        .simulate(new Procedure(SITE, List.of(vessel), List.of(step)), Credit.MODELLED)
+        .steps()
+        .get(0);
+  }
 }
