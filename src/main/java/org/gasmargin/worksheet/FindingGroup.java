@@ -13,6 +13,8 @@ import org.gasmargin.rules.Finding;
  * @param lines at least one
  */
 record FindingGroup(List<Line> lines) {
+  private static final int FEW = 4;
+
   /** Copies the list. */
   FindingGroup {
     lines = List.copyOf(lines);
@@ -27,7 +29,7 @@ record FindingGroup(List<Line> lines) {
   record Line(Finding finding, List<String> steps) {
     /** The steps as they are printed. */
     String stepWords() {
-      return String.join(", ", steps);
+      return String.join(steps.size() <= FEW ? ",\u00a0" : ", ", steps);
     }
   }
 

@@ -13,7 +13,7 @@ import org.gasmargin.worksheet.plot.MarginBar;
 
 /** Findings as tables with margin bars. */
 final class FindingsTable {
-  private static final float BAR_WIDTH = 80;
+  private static final float BAR_WIDTH = 79;
   private static final float WIDE_BAR_WIDTH = 150;
 
   private final WorksheetContent content;

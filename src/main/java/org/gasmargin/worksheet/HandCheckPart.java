@@ -33,9 +33,9 @@ final class HandCheckPart {
           Table.Column.text("Step"),
           Table.Column.text("Idealised change"),
           Table.Column.text("Work done by the gas"),
-          Table.Column.numbers("W / kJ"),
+          Table.Column.numbers("W/kJ"),
           Table.Column.text("Heat taken in by the gas"),
-          Table.Column.numbers("Q / kJ"));
+          Table.Column.numbers("Q/kJ"));
 
   private final WorksheetContent content;
   private final Governing governing;
@@ -121,7 +121,7 @@ final class HandCheckPart {
   private static Table.Row row(IdealisedChange change) {
     return Table.Row.of(
         Cell.of(change.step()),
-        Cell.name(change.change()),
+        Cell.plainName(change.change()),
         Cell.of(change.work()),
         Cell.of(Digits.of(change.value().work() / 1e3)),
         Cell.of(change.heat()),

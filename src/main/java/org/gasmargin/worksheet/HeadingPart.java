@@ -69,7 +69,8 @@ final class HeadingPart {
     } else if (finding.predicted().isPresent()) {
       sentence.append(Prose.tidy(finding.title())).append(": ");
     }
-    return sentence + Prose.sentence(finding.reason());
+    String why = Prose.sentence(finding.reason());
+    return sentence + (Governing.hasBar(finding) ? Prose.continued(why) : why);
   }
 
   private List<Block> judgedOn() {

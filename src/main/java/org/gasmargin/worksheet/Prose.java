@@ -9,6 +9,12 @@ final class Prose {
     return text.strip().replace("degC", "°C").replace("degF", "°F");
   }
 
+  /** A sentence that goes on after a colon: without its capital, unless a name or unit needs it. */
+  static String continued(String sentence) {
+    boolean word = sentence.length() > 1 && Character.isLowerCase(sentence.charAt(1));
+    return word ? Character.toLowerCase(sentence.charAt(0)) + sentence.substring(1) : sentence;
+  }
+
   /** The text as a sentence: a capital first and a full stop last. */
   static String sentence(String text) {
     String tidy = tidy(text);

@@ -54,13 +54,19 @@ final class StepWords {
     }
     Drive.Orifice orifice = (Drive.Orifice) drive;
     StringBuilder words = new StringBuilder(" through an orifice of ");
-    words.append(number(orifice.diameter(), Dimension.LENGTH));
+    words.append(bore(orifice.diameter()));
     words.append(", Cd ").append(Digits.trimmed(orifice.dischargeCoefficient().nominal()));
     orifice
         .until()
         .ifPresent(p -> words.append(", to ").append(number(p, Dimension.ABSOLUTE_PRESSURE)));
     orifice.duration().ifPresent(t -> words.append(", at most ").append(Durations.text(t)));
     return words.toString();
+  }
+
+  /** Bores read best in millimetres where the user counts in metres. */
+  private String bore(Interval diameter) {
+    Scale scale = Scale.of(Dimension.LENGTH, content.units());
+    return (scale.slope() == 1 ? Scale.MILLIMETRES : scale).text(diameter.nominal());
   }
 
   private String number(Interval value, Dimension dimension) {

@@ -6,7 +6,9 @@ import java.io.UncheckedIOException;
 import java.util.List;
 import org.gasmargin.rules.Finding;
 import org.gasmargin.worksheet.layout.Flow;
+import org.gasmargin.worksheet.layout.Paragraph;
 import org.gasmargin.worksheet.layout.Sheet;
+import org.gasmargin.worksheet.layout.Style;
 
 /** The document that a reviewer checks by hand and signs. */
 public final class Worksheet {
@@ -31,8 +33,7 @@ public final class Worksheet {
       governingFindings(flow, governing, findings);
       InputsPart.write(flow, content);
       new StepsPart(content).write(flow);
-      flow.section("Findings");
-      flow.add(findings.full(FindingGroup.of(governing.assessed())));
+      allFindings(flow, governing, findings);
       new HandCheckPart(content, governing).write(flow);
       NotAssessedPart.write(flow, content);
       ClosurePart.write(flow, content);
@@ -51,6 +52,24 @@ public final class Worksheet {
     flow.section("Governing findings");
     List<FindingGroup> groups = FindingGroup.of(deciding);
     flow.add(table.brief(groups.subList(0, Math.min(MOST_ON_FIRST_PAGE, groups.size()))));
+    if (groups.size() > MOST_ON_FIRST_PAGE) {
+      int more = groups.size() - MOST_ON_FIRST_PAGE;
+      flow.gap(2);
+      flow.add(
+          Paragraph.of(
+              "Rules with this verdict that are listed further down: " + more + ".",
+              Style.TABLE.strong()));
+    }
+  }
+
+  private static void allFindings(Flow flow, Governing governing, FindingsTable table) {
+    List<Finding> assessed = governing.assessed();
+    flow.section("Findings");
+    if (assessed.isEmpty()) {
+      flow.add(Paragraph.of("No rule could be evaluated.", Style.STRONG));
+    } else {
+      flow.add(table.full(FindingGroup.of(assessed)));
+    }
   }
 
   private static Sheet.Marks marks(WorksheetContent content) {

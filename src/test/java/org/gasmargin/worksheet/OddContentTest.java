@@ -60,6 +60,7 @@ class OddContentTest {
         SampleJob.with(SampleJob.steps(), manyFindings(100, word), JudgeOn.BOUNDS);
     assertNothingOutside(SampleJob.titled(content, word + " " + "word ".repeat(60), word));
     assertNothingOutside(SampleJob.content());
+    assertTrue(PdfText.text(content).contains("that are listed further down: 60."));
     assertNothingOutside(unknown());
   }
 
@@ -71,6 +72,8 @@ class OddContentTest {
     assertTrue(text.contains("highest gas temperature unknown"), text);
     assertTrue(text.contains("Extreme unknown: The gas would condense at 90 K."), text);
     assertTrue(text.contains("no balance: nothing could be computed"), text);
+    assertTrue(text.contains("Findings No rule could be evaluated."), text);
+    assertTrue(text.contains("No closed form leads to a number of this sheet"), text);
     assertFalse(text.contains("NaN"), text);
   }
 

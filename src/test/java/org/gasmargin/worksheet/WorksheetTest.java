@@ -27,7 +27,7 @@ class WorksheetTest {
         text,
         "OVER LIMIT",
         "Step 3, receiver: lowest metal temperature −",
-        "limit −20.0 °C (data sheet): The limit is passed.",
+        "limit −20.0 °C (data sheet): the limit is passed.",
         "Judged on the bounding paths",
         "Local codes, the nameplate and documents of the equipment",
         "Governing findings",

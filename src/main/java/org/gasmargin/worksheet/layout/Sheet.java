@@ -31,9 +31,9 @@ public final class Sheet implements AutoCloseable {
   /** Width of the content, pt. */
   public static final float CONTENT_WIDTH = PDRectangle.A4.getWidth() - 2 * LEFT;
 
-  static final float TOP = 50;
-  static final float BOTTOM = PDRectangle.A4.getHeight() - 52;
-  private static final float FOOTER = PDRectangle.A4.getHeight() - 44;
+  static final float TOP = 46;
+  static final float BOTTOM = PDRectangle.A4.getHeight() - 48;
+  private static final float FOOTER = PDRectangle.A4.getHeight() - 41;
 
   private final PDDocument document = new PDDocument();
   private final Fonts fonts = new Fonts(document);

@@ -14,13 +14,14 @@ import org.gasmargin.units.DisplayUnits;
  */
 public record Scale(double slope, double offset, String symbol) {
   private static final char NO_BREAK = '\u00a0';
-  private static final double SHORT = 1000;
+
+  /** Lengths in millimetres. */
+  public static final Scale MILLIMETRES = new Scale(1000, 0, "mm");
 
   /** The scale of a dimension in the units that the user typed, SI where there are none. */
   public static Scale of(Dimension dimension, DisplayUnits units) {
     return switch (dimension) {
       case PRESSURE_RATE -> pressureRate(units);
-      case LENGTH -> length(units);
       default -> plain(dimension, units);
     };
   }
@@ -61,13 +62,6 @@ public record Scale(double slope, double offset, String symbol) {
         .replace("degF", "°F")
         .replaceAll("\\b(k?m|cm|mm|in|ft)2\\b", "$1²")
         .replaceAll("\\b(k?m|cm|mm|in|ft)3\\b", "$1³");
-  }
-
-  /** Diameters read best in millimetres. */
-  private static Scale length(DisplayUnits units) {
-    return units.units().containsKey(Dimension.LENGTH)
-        ? plain(Dimension.LENGTH, units)
-        : new Scale(SHORT, 0, "mm");
   }
 
   private static Scale plain(Dimension dimension, DisplayUnits units) {

@@ -15,6 +15,7 @@ import org.gasmargin.worksheet.numbers.Digits;
  */
 public record Axis(double low, double high, boolean logarithmic, String title) {
   private static final int WANTED_TICKS = 4;
+  private static final double FLATTEST = 0.04;
 
   /** Refuses an axis without length. */
   public Axis {
@@ -31,10 +32,13 @@ public record Axis(double low, double high, boolean logarithmic, String title) {
    */
   public record Tick(double value, String label) {}
 
-  /** A linear axis that shows all values between two, with a little room at both ends. */
+  /**
+   * A linear axis that shows all values between two, with a little room at both ends, and so long
+   * that what hardly changes looks flat.
+   */
   public static Axis linear(double least, double most, String title) {
     double scale = Math.max(Math.abs(least), Math.abs(most));
-    double range = Math.max(most - least, Math.max(scale * 1e-3, Double.MIN_NORMAL * 1e9));
+    double range = Math.max(most - least, Math.max(scale * FLATTEST, Double.MIN_NORMAL * 1e9));
     double middle = (least + most) / 2;
     return new Axis(middle - range * 0.56, middle + range * 0.56, false, title);
   }
