@@ -56,7 +56,7 @@ final class MethodPart {
     labelled(
         flow,
         "Identity",
-        "Inputs and rule packs: SHA-256 "
+        "Job file: SHA-256 "
             + content.inputsSha256()
             + ". Program: gasmargin "
             + content.programVersion()
