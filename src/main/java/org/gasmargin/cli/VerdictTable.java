@@ -63,18 +63,10 @@ final class VerdictTable {
         finding.quantity(),
         value(finding.predicted(), finding.dimension()),
         value(finding.limit(), finding.dimension()),
-        value(finding.margin(), differenceOf(finding.dimension())));
+        value(finding.margin(), finding.dimension().difference()));
   }
 
   private String value(OptionalDouble si, Dimension dimension) {
     return si.isPresent() ? units.format(si.getAsDouble(), dimension) : "-";
-  }
-
-  private static Dimension differenceOf(Dimension dimension) {
-    return switch (dimension) {
-      case ABSOLUTE_PRESSURE -> Dimension.PRESSURE_DIFFERENCE;
-      case TEMPERATURE -> Dimension.TEMPERATURE_DIFFERENCE;
-      default -> dimension;
-    };
   }
 }

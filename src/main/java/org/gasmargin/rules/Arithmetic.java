@@ -10,7 +10,6 @@ import static org.gasmargin.units.Dimension.TIME;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import org.gasmargin.units.Dimension;
 
 /**
@@ -29,15 +28,7 @@ final class Arithmetic {
           TIME,
           RATIO);
 
-  private static final Map<Dimension, Dimension> DIFFERENCE_OF =
-      Map.of(ABSOLUTE_PRESSURE, PRESSURE_DIFFERENCE, TEMPERATURE, TEMPERATURE_DIFFERENCE);
-
   private Arithmetic() {}
-
-  /** The dimension of the distance between two values. */
-  static Dimension differenceOf(Dimension dimension) {
-    return DIFFERENCE_OF.getOrDefault(dimension, dimension);
-  }
 
   /** The four operations. */
   enum Operator {
@@ -75,8 +66,8 @@ final class Arithmetic {
   static List<Operation> operations() {
     List<Operation> all = new ArrayList<>();
     for (Dimension dimension : DIMENSIONS) {
-      if (DIFFERENCE_OF.containsKey(dimension)) {
-        addPoint(all, dimension, differenceOf(dimension));
+      if (dimension.difference() != dimension) {
+        addPoint(all, dimension, dimension.difference());
       } else {
         addLinear(all, dimension);
       }

@@ -51,7 +51,7 @@ final class ExpressionReader {
       return margin;
     }
     Dimension actual = margin.get().dimension().orElseThrow();
-    Dimension expected = predicted.map(Arithmetic::differenceOf).orElse(actual);
+    Dimension expected = predicted.map(Dimension::difference).orElse(actual);
     if (expected != actual) {
       issues.add(
           value.place(),

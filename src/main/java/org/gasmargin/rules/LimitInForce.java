@@ -66,7 +66,7 @@ record LimitInForce(double value, String origin, Operand requiredMargin, String 
     }
     Operand margin = marginOfRule;
     if (limit.requiredMargin().isPresent()) {
-      Dimension difference = Arithmetic.differenceOf(rule.predicted().dimension());
+      Dimension difference = rule.predicted().dimension().difference();
       double asked = limit.requiredMargin().getAsDouble();
       margin =
           Operand.number(new Measure(difference, asked), "", "the margin that the job asks for");

@@ -22,7 +22,7 @@ final class RuleJudging {
   private RuleJudging(Rule rule, StepView view) {
     this.rule = rule;
     this.view = view;
-    difference = Arithmetic.differenceOf(rule.predicted().dimension());
+    difference = rule.predicted().dimension().difference();
   }
 
   /** What the rule says of the step. */

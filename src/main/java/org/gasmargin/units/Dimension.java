@@ -44,4 +44,13 @@ public enum Dimension {
   public String example() {
     return example;
   }
+
+  /** What the distance between two values of this dimension is measured in. */
+  public Dimension difference() {
+    return switch (this) {
+      case ABSOLUTE_PRESSURE -> PRESSURE_DIFFERENCE;
+      case TEMPERATURE -> TEMPERATURE_DIFFERENCE;
+      default -> this;
+    };
+  }
 }

@@ -28,11 +28,7 @@ public record Scale(double slope, double offset, String symbol) {
 
   /** The scale of differences between values of a dimension. */
   public static Scale ofDifference(Dimension dimension, DisplayUnits units) {
-    return switch (dimension) {
-      case ABSOLUTE_PRESSURE -> of(Dimension.PRESSURE_DIFFERENCE, units);
-      case TEMPERATURE -> of(Dimension.TEMPERATURE_DIFFERENCE, units);
-      default -> of(dimension, units);
-    };
+    return of(dimension.difference(), units);
   }
 
   /** Number and unit without needless zeros. */
