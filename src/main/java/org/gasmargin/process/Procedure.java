@@ -17,4 +17,16 @@ public record Procedure(Site site, List<Vessel> vessels, List<Step> steps) {
     vessels = List.copyOf(vessels);
     steps = List.copyOf(steps);
   }
+
+  /**
+   * The vessel that a step acts on.
+   *
+   * @throws IllegalArgumentException if the step names none of the vessels
+   */
+  public Vessel vesselOf(Step step) {
+    return vessels.stream()
+        .filter(vessel -> vessel.name().equals(step.vessel()))
+        .findFirst()
+        .orElseThrow(() -> new IllegalArgumentException("no vessel " + step.vessel()));
+  }
 }

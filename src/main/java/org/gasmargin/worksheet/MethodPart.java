@@ -1,6 +1,7 @@
 package org.gasmargin.worksheet;
 
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -9,12 +10,9 @@ import java.util.Optional;
 import java.util.Set;
 import org.gasmargin.gas.Gas;
 import org.gasmargin.gas.ValidityRange;
-import org.gasmargin.process.Path;
-import org.gasmargin.process.StepResult;
 import org.gasmargin.rules.NotApplied;
 import org.gasmargin.rules.PackUsed;
 import org.gasmargin.units.Dimension;
-import org.gasmargin.vessel.Vessel;
 import org.gasmargin.worksheet.layout.Flow;
 import org.gasmargin.worksheet.layout.Paragraph;
 import org.gasmargin.worksheet.layout.Run;
@@ -47,7 +45,9 @@ final class MethodPart {
             + " judge on them.");
     for (Gas gas : gases()) {
       labelled(flow, gas.name(), validity(gas));
-      warnings(gas).forEach(warning -> labelled(flow, "Beyond the fit", warning));
+      new FittedRange(content, gas)
+          .warning()
+          .ifPresent(warning -> labelled(flow, "BEYOND THE FIT", warning));
     }
     WallSources.of(content.result().procedure())
         .forEach((name, text) -> labelled(flow, name, text));
@@ -68,10 +68,14 @@ final class MethodPart {
     flow.gap(2);
   }
 
-  private Set<Gas> gases() {
-    Set<Gas> gases = new LinkedHashSet<>();
-    content.result().procedure().vessels().forEach(vessel -> gases.add(vessel.gas()));
-    return gases;
+  private Collection<Gas> gases() {
+    Map<String, Gas> gases = new LinkedHashMap<>();
+    content
+        .result()
+        .procedure()
+        .vessels()
+        .forEach(vessel -> gases.putIfAbsent(vessel.gas().id(), vessel.gas()));
+    return gases.values();
   }
 
   private String validity(Gas gas) {
@@ -86,41 +90,6 @@ final class MethodPart {
         + "; published for temperatures up to "
         + temperature.text(range.fittedMaxTemperature(), 0)
         + ".";
-  }
-
-  private List<String> warnings(Gas gas) {
-    double fitted = gas.validity().fittedMaxTemperature();
-    List<String> warnings = new ArrayList<>();
-    for (StepResult result : content.result().steps()) {
-      if (vessel(result).gas().equals(gas)) {
-        for (PathLook look : PathLook.ALL) {
-          result
-              .path(look.kind())
-              .filter(path -> path.peakGasTemperature() > fitted)
-              .ifPresent(path -> warnings.add(warning(result, look, path, fitted)));
-        }
-      }
-    }
-    return warnings;
-  }
-
-  private String warning(StepResult result, PathLook look, Path path, double fitted) {
-    return "step "
-        + result.step().id()
-        + " reaches "
-        + temperature.text(path.peakGasTemperature(), 1)
-        + " on path "
-        + look.letter()
-        + "; above "
-        + temperature.text(fitted, 1)
-        + " the equation of state extrapolates its data and its accuracy is not known.";
-  }
-
-  private Vessel vessel(StepResult result) {
-    return content.result().procedure().vessels().stream()
-        .filter(vessel -> vessel.name().equals(result.step().vessel()))
-        .findFirst()
-        .orElseThrow();
   }
 
   private String packs() {

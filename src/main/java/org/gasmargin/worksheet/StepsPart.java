@@ -22,7 +22,7 @@ final class StepsPart {
     this.content = content;
     this.words = new StepWords(content);
     this.paths = new PathTable(content.units());
-    this.envelopes = new EnvelopeTable(content.units());
+    this.envelopes = new EnvelopeTable(content);
     this.plots = new StepPlots(content);
   }
 

@@ -36,11 +36,7 @@ final class VolumePlot {
 
   VolumePlot(WorksheetContent content, StepResult result, Scale gaugeOrAbsolute) {
     this.result = result;
-    this.vessel =
-        content.result().procedure().vessels().stream()
-            .filter(candidate -> candidate.name().equals(result.step().vessel()))
-            .findFirst()
-            .orElseThrow();
+    this.vessel = content.result().procedure().vesselOf(result.step());
     String symbol = gaugeOrAbsolute.symbol();
     this.pressure =
         new Scale(gaugeOrAbsolute.slope(), 0, symbol.endsWith("(g)") ? absolute(symbol) : symbol);

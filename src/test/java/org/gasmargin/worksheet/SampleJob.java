@@ -62,6 +62,34 @@ final class SampleJob {
     return with(steps, SampleFindings.all(RESULT), JudgeOn.MODELLED);
   }
 
+  /** The paths of air in a vessel of another gas: for what the page says of the gas alone. */
+  static WorksheetContent filledWith(String gas) {
+    Procedure air = RESULT.procedure();
+    Vessel vessel = air.vessels().get(0);
+    Vessel other =
+        new Vessel(
+            vessel.name(),
+            new GasCatalogue().find(gas).orElseThrow(),
+            vessel.volume(),
+            vessel.startPressure(),
+            vessel.startTemperature(),
+            vessel.startWallTemperature(),
+            vessel.wall());
+    WorksheetContent content = content();
+    return new WorksheetContent(
+        content.title(),
+        content.number(),
+        content.revision(),
+        content.preparedBy(),
+        new ProcedureResult(new Procedure(air.site(), List.of(other), air.steps()), steps()),
+        content.limits(),
+        content.judgement(),
+        content.entries(),
+        content.units(),
+        content.inputsSha256(),
+        content.programVersion());
+  }
+
   static ProcedureResult result() {
     return RESULT;
   }

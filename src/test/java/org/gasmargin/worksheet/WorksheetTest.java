@@ -100,7 +100,22 @@ class WorksheetTest {
         PdfText.text(SampleJob.credited()),
         "CREDIT FOR WALL HEAT",
         "Step 1: Inside film coefficient ± 30 %",
-        "Governing findings");
+        "Governing findings",
+        "Extreme over all starts Bound Credited",
+        "highest gas temperature",
+        "66.9 °C",
+        "highest wall temperature – 32.9 °C");
+  }
+
+  @Test
+  void pathBeyondTheFitOfTheEquationIsWarnedOf() throws IOException {
+    WorksheetContent content = SampleJob.filledWith("oxygen");
+    assertEquals(
+        300, content.result().procedure().vessels().get(0).gas().validity().fittedMaxTemperature());
+    String text = PdfText.text(content);
+    assertTrue(text.contains("BEYOND THE FIT: step 1, 2, 3 reaches up to "), text);
+    assertTrue(text.contains("above 26.9 °C the equation of state of Oxygen extrapolates"), text);
+    assertFalse(PdfText.text(SampleJob.content()).contains("BEYOND THE FIT"));
   }
 
   @Test

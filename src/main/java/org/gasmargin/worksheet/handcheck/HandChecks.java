@@ -187,9 +187,6 @@ public final class HandChecks {
   }
 
   private Vessel vessel(Step step) {
-    return result.procedure().vessels().stream()
-        .filter(vessel -> vessel.name().equals(step.vessel()))
-        .findFirst()
-        .orElseThrow();
+    return result.procedure().vesselOf(step);
   }
 }

@@ -21,11 +21,7 @@ public final class IdealisedChanges {
   public static List<IdealisedChange> of(ProcedureResult result) {
     List<IdealisedChange> changes = new ArrayList<>();
     for (StepResult step : result.steps()) {
-      Vessel vessel =
-          result.procedure().vessels().stream()
-              .filter(candidate -> candidate.name().equals(step.step().vessel()))
-              .findFirst()
-              .orElseThrow();
+      Vessel vessel = result.procedure().vesselOf(step.step());
       double ambient = result.procedure().site().ambientTemperature().nominal();
       PathKind kind = step.step() instanceof Step.Compress ? PathKind.UNMIXED : PathKind.ADIABATIC;
       Optional<Path> path = step.path(kind).or(() -> step.path(PathKind.ADIABATIC));
