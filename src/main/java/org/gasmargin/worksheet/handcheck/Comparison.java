@@ -13,14 +13,19 @@ import org.gasmargin.worksheet.numbers.Digits;
  * @param real the real-gas value, K or Pa absolute
  * @param highest whether a highest value is looked for, not a lowest
  * @param frame units
+ * @param band where the real value must lie, if that is known
  */
-record Comparison(Calculation calculation, double real, boolean highest, UnitFrame frame) {
-
+record Comparison(
+    Calculation calculation,
+    double real,
+    boolean highest,
+    UnitFrame frame,
+    Optional<Bands.Band> band) {
   private static final Set<String> PRESSURES = Set.of(Bands.ISOCHORE, Bands.MASS_CHARGE);
 
   /** Whether the real value lies in the band; empty if there is no band. */
   Optional<Boolean> agreement() {
-    return band().map(band -> real >= low(band) && real <= high(band));
+    return band.map(known -> real >= low(known) && real <= high(known));
   }
 
   List<String> sentences() {
@@ -29,10 +34,6 @@ record Comparison(Calculation calculation, double real, boolean highest, UnitFra
     sentences.add(lean());
     sentences.add(bandSentence());
     return sentences;
-  }
-
-  private Optional<Bands.Band> band() {
-    return Bands.find(calculation.band());
   }
 
   private String values() {
@@ -105,27 +106,26 @@ record Comparison(Calculation calculation, double real, boolean highest, UnitFra
   }
 
   private String bandSentence() {
-    Optional<Bands.Band> found = band();
-    if (found.isEmpty()) {
+    if (band.isEmpty()) {
       return "No band is known for this gas and range, so the two values cannot be held against"
           + " each other here.";
     }
-    Bands.Band band = found.get();
+    Bands.Band known = band.get();
     String words =
         "Band: in "
-            + band.cases()
+            + known.cases()
             + " cases of "
             + calculation.band().gas()
             + " over this range ("
-            + band.range()
+            + known.range()
             + "), computed with published equations of state, real over ideal lay between "
-            + Digits.plain(band.lower(), 3)
+            + Digits.plain(known.lower(), 3)
             + " and "
-            + Digits.plain(band.upper(), 3)
+            + Digits.plain(known.upper(), 3)
             + ", so here between "
-            + text(low(band))
+            + text(low(known))
             + " and "
-            + text(high(band))
+            + text(high(known))
             + ". ";
     return words
         + (agreement().orElse(false)
@@ -133,12 +133,12 @@ record Comparison(Calculation calculation, double real, boolean highest, UnitFra
             : "THE REAL-GAS VALUE LIES OUTSIDE: do not sign before somebody has explained why.");
   }
 
-  private double low(Bands.Band band) {
-    return band.lower() * calculation.ideal();
+  private double low(Bands.Band known) {
+    return known.lower() * calculation.ideal();
   }
 
-  private double high(Bands.Band band) {
-    return band.upper() * calculation.ideal();
+  private double high(Bands.Band known) {
+    return known.upper() * calculation.ideal();
   }
 
   private boolean isPressure() {

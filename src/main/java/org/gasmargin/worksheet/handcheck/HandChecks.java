@@ -2,6 +2,7 @@ package org.gasmargin.worksheet.handcheck;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import org.gasmargin.process.Drive;
 import org.gasmargin.process.Envelope;
 import org.gasmargin.process.Extreme;
@@ -65,7 +66,7 @@ public final class HandChecks {
           check(step, envelope.highestUnmixedTemperature(), predicted, Sought.UNMIXED)
               .or(() -> check(step, envelope.highestGasTemperature(), predicted, Sought.HOTTEST))
               .or(() -> check(step, envelope.lowestGasTemperature(), predicted, Sought.COLDEST))
-              .or(() -> adiabaticBound(step, finding));
+              .or(() -> adiabaticBound(step, finding, predicted));
       case ABSOLUTE_PRESSURE ->
           check(step, envelope.highestPressure(), predicted, Sought.HIGHEST_PRESSURE)
               .or(() -> check(step, envelope.lowestPressure(), predicted, Sought.LOWEST_PRESSURE))
@@ -96,28 +97,43 @@ public final class HandChecks {
 
   private Optional<HandCheck> check(
       StepResult step, Optional<Extreme> extreme, double predicted, Sought sought) {
-    if (extreme.isEmpty() || Math.abs(extreme.get().value() / predicted - 1) > SAME) {
+    if (!is(extreme, predicted)) {
       return Optional.empty();
     }
     String what = "Step " + step.step().id() + ", " + sought.words + ": " + extreme.get().path();
     return extreme.get().stretch().flatMap(s -> check(step, s, predicted, sought, what));
   }
 
+  private static boolean is(Optional<Extreme> extreme, double predicted) {
+    return extreme.isPresent() && Math.abs(extreme.get().value() / predicted - 1) <= SAME;
+  }
+
   /**
    * The bound without heat exchange, where the number itself counts on the wall: the modelled value
    * must not pass it.
    */
-  private Optional<HandCheck> adiabaticBound(StepResult step, Finding finding) {
+  private Optional<HandCheck> adiabaticBound(StepResult step, Finding finding, double predicted) {
+    Envelope envelope = step.envelope();
+    boolean isBound =
+        Stream.of(
+                envelope.highestGasTemperature(),
+                envelope.lowestGasTemperature(),
+                envelope.highestUnmixedTemperature())
+            .anyMatch(extreme -> is(extreme, predicted));
     Optional<Path> path = step.path(PathKind.ADIABATIC);
-    if (path.isEmpty()) {
+    if (isBound || path.isEmpty()) {
       return Optional.empty();
     }
     PathPoint first = path.get().first();
     PathPoint last = path.get().last();
+    double towards = last.temperature() - first.temperature();
+    if (!((predicted - first.temperature()) * towards > 0)) {
+      return Optional.empty();
+    }
     Stretch stretch =
         new Stretch(
             first.pressure(), first.temperature(), last.pressure(), last.temperature(), false);
-    Sought sought = last.temperature() > first.temperature() ? Sought.HOTTEST : Sought.COLDEST;
+    Sought sought = towards > 0 ? Sought.HOTTEST : Sought.COLDEST;
     String what =
         "Step "
             + step.step().id()
@@ -151,7 +167,9 @@ public final class HandChecks {
         .map(
             calculation -> {
               UnitFrame frame = UnitFrame.of(stretch, units);
-              Comparison comparison = new Comparison(calculation, real, sought.highest, frame);
+              Comparison comparison =
+                  new Comparison(
+                      calculation, real, sought.highest, frame, Bands.find(calculation.band()));
               return new HandCheck(
                   what,
                   calculation.title(),

@@ -52,6 +52,27 @@ enum Situation {
 
   /** The hand check of the situation's number for a gas, if a closed form leads there. */
   Optional<HandCheck> check(String gasName, DisplayUnits units) {
+    Case done = compute(gasName);
+    return new HandChecks(done.result(), units).of(finding(done));
+  }
+
+  /**
+   * A computed situation.
+   *
+   * @param result the procedure with the step that sets the number
+   */
+  record Case(ProcedureResult result) {
+    StepResult step() {
+      return result.steps().get(0);
+    }
+
+    Gas gas() {
+      return result.procedure().vessels().get(0).gas();
+    }
+  }
+
+  /** Computes the bounds of the situation. */
+  Case compute(String gasName) {
     Gas gas = new GasCatalogue().find(gasName).orElseThrow();
     Vessel vessel =
         new Vessel(
@@ -82,8 +103,7 @@ enum Situation {
             List.of(),
             Optional.empty());
     Procedure procedure = new Procedure(site, List.of(vessel), List.of(step));
-    return new HandChecks(new ProcedureResult(procedure, List.of(result)), units)
-        .of(finding(step, predicted(gas, result)));
+    return new Case(new ProcedureResult(procedure, List.of(result)));
   }
 
   private List<Step> steps(Gas gas) {
@@ -103,8 +123,9 @@ enum Situation {
     return new Step.Fill("1", "v", BANK, drive, OptionalDouble.empty());
   }
 
-  private double predicted(Gas gas, StepResult result) {
-    Envelope envelope = result.envelope();
+  private double predicted(Case done) {
+    Gas gas = done.gas();
+    Envelope envelope = done.step().envelope();
     Optional<Extreme> extreme =
         switch (this) {
           case CHARGE -> envelope.highestGasTemperature();
@@ -112,7 +133,7 @@ enum Situation {
           case COMPRESSION -> envelope.highestUnmixedTemperature();
           default -> envelope.highestPressure();
         };
-    StepResult.DensityRange amount = result.settledAmount().orElseThrow();
+    StepResult.DensityRange amount = done.step().settledAmount().orElseThrow();
     return switch (this) {
       case DEVELOPED -> gas.at(338.15, amount.most()).pressure();
       case SETTLED -> gas.at(288.15, amount.least()).pressure();
@@ -120,17 +141,17 @@ enum Situation {
     };
   }
 
-  private Finding finding(Step step, double predicted) {
+  private Finding finding(Case done) {
     return new Finding(
         "test.rule",
         "Test",
-        step.id(),
+        done.step().step().id(),
         "v",
         Verdict.OVER_LIMIT,
         Severity.DAMAGE,
         quantity,
         dimension,
-        OptionalDouble.of(predicted),
+        OptionalDouble.of(predicted(done)),
         OptionalDouble.empty(),
         Optional.empty(),
         OptionalDouble.empty(),
