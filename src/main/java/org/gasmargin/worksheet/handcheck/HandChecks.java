@@ -66,7 +66,7 @@ public final class HandChecks {
           check(step, envelope.highestUnmixedTemperature(), predicted, Sought.UNMIXED)
               .or(() -> check(step, envelope.highestGasTemperature(), predicted, Sought.HOTTEST))
               .or(() -> check(step, envelope.lowestGasTemperature(), predicted, Sought.COLDEST))
-              .or(() -> adiabaticBound(step, finding, predicted));
+              .or(() -> adiabaticPath(step, finding, predicted));
       case ABSOLUTE_PRESSURE ->
           check(step, envelope.highestPressure(), predicted, Sought.HIGHEST_PRESSURE)
               .or(() -> check(step, envelope.lowestPressure(), predicted, Sought.LOWEST_PRESSURE))
@@ -109,10 +109,11 @@ public final class HandChecks {
   }
 
   /**
-   * The bound without heat exchange, where the number itself counts on the wall: the modelled value
-   * must not pass it.
+   * The path without heat exchange from the nominal start, where no closed form leads to the number
+   * itself: a bound that a value which counts on the wall must not pass, or the nearest path to an
+   * extreme on the way to which the surroundings give or take heat.
    */
-  private Optional<HandCheck> adiabaticBound(StepResult step, Finding finding, double predicted) {
+  private Optional<HandCheck> adiabaticPath(StepResult step, Finding finding, double predicted) {
     Envelope envelope = step.envelope();
     boolean isBound =
         Stream.of(
@@ -121,7 +122,7 @@ public final class HandChecks {
                 envelope.highestUnmixedTemperature())
             .anyMatch(extreme -> is(extreme, predicted));
     Optional<Path> path = step.path(PathKind.ADIABATIC);
-    if (isBound || path.isEmpty()) {
+    if (path.isEmpty()) {
       return Optional.empty();
     }
     PathPoint first = path.get().first();
@@ -137,9 +138,13 @@ public final class HandChecks {
     String what =
         "Step "
             + step.step().id()
-            + ", bound without heat exchange, behind which the predicted value ("
-            + finding.quantity()
-            + ") must stay";
+            + (isBound
+                ? ", path without heat exchange; heat passes on the way to the predicted value ("
+                    + finding.quantity()
+                    + "), so no closed form leads to it"
+                : ", bound without heat exchange, behind which the predicted value ("
+                    + finding.quantity()
+                    + ") must stay");
     return check(step, stretch, last.temperature(), sought, what);
   }
 

@@ -85,8 +85,10 @@ class HandChecksTest {
 
   /** Methane cools so much as it enters that the surroundings warm it on the way. */
   @Test
-  void pathOnWhichHeatPassesHasNoClosedForm() {
+  void pathOnWhichHeatPassesHasNoClosedFormOfItsOwn() {
     assertEquals(Optional.empty(), Situation.MASS_CHARGE.check("methane", METRIC));
+    HandCheck check = Situation.CHARGE.check("methane", METRIC).orElseThrow();
+    assertTrue(check.what().contains("heat passes on the way to the predicted"), check.what());
   }
 
   private static DisplayUnits units(String names) {
