@@ -10,10 +10,8 @@ import org.gasmargin.gas.OutsideValidity;
 import org.gasmargin.gas.State;
 import org.gasmargin.process.Closure;
 import org.gasmargin.process.Drive;
-import org.gasmargin.process.Path;
 import org.gasmargin.process.PathKind;
 import org.gasmargin.process.PathOutcome;
-import org.gasmargin.process.PathPoint;
 import org.gasmargin.process.Site;
 import org.gasmargin.process.Step;
 import org.gasmargin.units.Interval;
@@ -57,14 +55,16 @@ public final class BoundTrack {
   public BoundStep advance(Step step, Surroundings surroundings) {
     StepPlan plan = new StepPlan(step, vessel, site);
     Map<PathKind, PathOutcome> paths = new EnumMap<>(PathKind.class);
-    isothermal = isothermal.flatMap(start -> isothermalPath(plan, start, paths));
+    isothermal =
+        isothermal.flatMap(start -> isothermalPath(plan, start, paths)).map(TimedPath.Result::end);
     Optional<State> before = adiabatic;
-    adiabatic = before.flatMap(start -> adiabaticPath(plan, start, paths));
+    Optional<TimedPath.Result> run = before.flatMap(start -> adiabaticPath(plan, start, paths));
+    adiabatic = run.map(TimedPath.Result::end);
     paths.put(PathKind.UNMIXED, unmixed(plan, before, paths.get(PathKind.ADIABATIC)));
     paths.putIfAbsent(PathKind.ISOTHERMAL, new PathOutcome.Failed(EARLIER));
     paths.putIfAbsent(PathKind.ADIABATIC, new PathOutcome.Failed(EARLIER));
     Optional<Closure> closure =
-        before.flatMap(start -> adiabatic.flatMap(end -> closure(plan, start, end, paths)));
+        before.flatMap(start -> run.flatMap(result -> closure(plan, start, result)));
 
     Optional<StepBounds.Reach> reach =
         entries.map(nodes -> StepBounds.follow(plan, nodes, surroundings));
@@ -78,13 +78,13 @@ public final class BoundTrack {
         entries.filter(NodeSet::complete).map(NodeSet::amount));
   }
 
-  private Optional<State> isothermalPath(
+  private Optional<TimedPath.Result> isothermalPath(
       StepPlan plan, State start, Map<PathKind, PathOutcome> paths) {
     double wall = vessel.startWallTemperature().nominal();
     return follow(PathKind.ISOTHERMAL, plan, new PathLaw.Isothermal(wall), start, paths);
   }
 
-  private Optional<State> adiabaticPath(
+  private Optional<TimedPath.Result> adiabaticPath(
       StepPlan plan, State start, Map<PathKind, PathOutcome> paths) {
     try {
       return follow(PathKind.ADIABATIC, plan, plan.law(true), start, paths);
@@ -94,12 +94,12 @@ public final class BoundTrack {
     }
   }
 
-  private static Optional<State> follow(
+  private static Optional<TimedPath.Result> follow(
       PathKind kind, StepPlan plan, PathLaw law, State start, Map<PathKind, PathOutcome> paths) {
     try {
       TimedPath.Result result = TimedPath.follow(plan, law, start);
       paths.put(kind, new PathOutcome.Computed(result.path()));
-      return Optional.of(result.end());
+      return Optional.of(result);
     } catch (OutsideValidity failure) {
       paths.put(kind, new PathOutcome.Failed(message(failure)));
       return Optional.empty();
@@ -122,18 +122,15 @@ public final class BoundTrack {
     }
   }
 
-  private Optional<Closure> closure(
-      StepPlan plan, State start, State end, Map<PathKind, PathOutcome> paths) {
-    if (!(paths.get(PathKind.ADIABATIC) instanceof PathOutcome.Computed computed)) {
-      return Optional.empty();
-    }
+  private Optional<Closure> closure(StepPlan plan, State start, TimedPath.Result run) {
+    State end = run.end();
     try {
       Gas gas = vessel.gas();
       PathLaw law = plan.law(true);
       if (plan.step() instanceof Step.Compress) {
         return Optional.of(PathClosure.compression(gas, start, end));
       }
-      double flowed = flowed(plan, law, start, end, computed.path());
+      double flowed = flowed(plan, law, start, run);
       return Optional.of(
           law instanceof PathLaw.Charging charging
               ? PathClosure.charging(charging, start, end, flowed)
@@ -144,21 +141,20 @@ public final class BoundTrack {
   }
 
   /** Amount that the flow of the step brought in, apart from the end state, mol/m3. */
-  private double flowed(StepPlan plan, PathLaw law, State start, State end, Path path) {
+  private double flowed(StepPlan plan, PathLaw law, State start, TimedPath.Result run) {
     double perMass = 1 / (vessel.volume().nominal() * vessel.gas().molarMass());
     Optional<Drive> drive = plan.drive();
     if (drive.isEmpty()) {
       return 0;
     }
     if (drive.get() instanceof Drive.PressureRamp) {
-      return PathClosure.flowedByPressure(vessel.gas(), law, start, end);
+      return PathClosure.flowedByPressure(vessel.gas(), law, start, run.end());
     }
     if (drive.get() instanceof Drive.MassFlow flow) {
       double sign = plan.step() instanceof Step.Fill ? 1 : -1;
       return sign * flow.massFlow().nominal() * flow.duration() * perMass;
     }
-    PathPoint first = path.first();
-    return (path.last().mass() - first.mass()) * perMass;
+    return -run.discharged() * perMass;
   }
 
   private State start(double pressure, double temperature) {

@@ -51,9 +51,7 @@ final class StepBounds {
       bounds.failures.add("an earlier step left the validity of its model, so its end is unknown");
       bounds.loseAll();
     }
-    for (Node entry : entries.nodes()) {
-      bounds.followFrom(entry);
-    }
+    bounds.followAll(entries);
     Optional<Extreme> unmixed = entries.complete() ? bounds.unmixed(entries) : Optional.empty();
     return new Reach(
         new Envelope(
@@ -70,17 +68,19 @@ final class StepBounds {
             : Optional.of(new NodeSet(bounds.ends, bounds.complete).pruned()));
   }
 
-  private void followFrom(Node entry) {
+  private void followAll(NodeSet entries) {
     try {
       PathLaw hot = plan.law(true);
       PathLaw cold = plan.law(false);
-      take(entry, branch(entry, hot, Exchange.NONE));
-      Branch up = branch(entry, hot, Exchange.keepAbove(surroundings.hottest()));
-      take(entry, up);
-      up.failure().ifPresent(why -> loseHigh());
-      Branch down = branch(entry, cold, Exchange.keepBelow(surroundings.coldest()));
-      take(entry, down);
-      down.failure().ifPresent(why -> loseLow());
+      for (Node entry : entries.nodes()) {
+        take(entry, branch(entry, hot, Exchange.NONE));
+        Branch up = branch(entry, hot, Exchange.keepAbove(surroundings.hottest()));
+        take(entry, up);
+        up.failure().ifPresent(why -> loseHigh());
+        Branch down = branch(entry, cold, Exchange.keepBelow(surroundings.coldest()));
+        take(entry, down);
+        down.failure().ifPresent(why -> loseLow());
+      }
     } catch (OutsideValidity supplyFailure) {
       failures.add(String.valueOf(supplyFailure.getMessage()));
       complete = false;

@@ -24,6 +24,7 @@ final class TimedPath {
   private final List<State> states = new ArrayList<>();
   private final List<PathPoint> points = new ArrayList<>();
   private final OptionalDouble wall;
+  private double discharged;
 
   private TimedPath(StepPlan plan, PathLaw law) {
     this.plan = plan;
@@ -39,8 +40,10 @@ final class TimedPath {
    *
    * @param path the path in time
    * @param end the state at its end
+   * @param discharged mass that left through an orifice, integrated apart from the density, kg;
+   *     zero for every other drive
    */
-  record Result(Path path, State end) {}
+  record Result(Path path, State end, double discharged) {}
 
   /**
    * Follows a law through the step.
@@ -140,6 +143,7 @@ final class TimedPath {
       State state = discharge.stateAt(history.densityAt(time));
       add(time, state, -discharge.flow(state).massFlow());
     }
+    discharged = history.discharged();
     if (orifice.duration().isPresent()
         && history.duration() < orifice.duration().getAsDouble()
         && orifice.until().isEmpty()) {
@@ -179,6 +183,7 @@ final class TimedPath {
             states.stream().mapToDouble(State::pressure).min().orElseThrow(),
             wall,
             wall),
-        states.get(states.size() - 1));
+        states.get(states.size() - 1),
+        discharged);
   }
 }
