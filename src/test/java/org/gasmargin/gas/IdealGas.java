@@ -5,8 +5,8 @@ import java.util.Set;
 import org.jspecify.annotations.Nullable;
 
 /**
- * Ideal gas with constant heat capacities, for hand checks and closed forms; never the model of a
- * real gas. The datum is u = 0 at 0 K and s = 0 at 298.15 K and 101 325 Pa.
+ * Ideal gas with constant heat capacities, for the closed forms of tests; never the model of a real
+ * gas. The datum is u = 0 at 0 K and s = 0 at 298.15 K and 101 325 Pa.
  *
  * <p>It has no transport properties of its own: they are constants that the caller gives with
  * {@link #withTransport}, and are refused until then.
