@@ -13,20 +13,10 @@ import picocli.CommandLine.Spec;
 /** Predicts, judges and writes the worksheet of one job. */
 @Command(
     name = "check",
-    mixinStandardHelpOptions = true,
-    versionProvider = ProgramVersion.class,
     description = {
       "Predicts every step of a job, judges it by rules and writes the worksheet (PDF), the result"
           + " (JSON) and the paths over time (CSV).",
       "The verdict is a prediction to be checked by a competent person, not a permission."
-    },
-    exitCodeListHeading = "Exit codes:%n",
-    exitCodeList = {
-      "0:every finding is within its limits",
-      "1:a margin is short or a limit is exceeded",
-      "2:the input or the usage is wrong",
-      "3:something was not assessed, and nothing is worse",
-      "70:internal fault"
     })
 final class CheckCommand implements Callable<Integer> {
   @Spec
@@ -58,9 +48,10 @@ final class CheckCommand implements Callable<Integer> {
   @Override
   public Integer call() {
     JobCheck check = JobCheck.of(job);
-    List<Path> written = new JobOutput(job, out, !noPdf).write(check.content());
+    String result = ResultJson.text(check.content());
+    List<Path> written = new JobOutput(job, out, !noPdf).write(check.content(), result);
     if (json) {
-      spec.commandLine().getOut().println(ResultJson.text(check.content()));
+      spec.commandLine().getOut().println(result);
     } else {
       new VerdictTable(check.content().units())
           .lines(check.content().title(), check.content().judgement())

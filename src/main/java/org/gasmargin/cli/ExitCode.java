@@ -20,19 +20,4 @@ final class ExitCode {
       case MARGIN_SHORT, OVER_LIMIT -> MARGIN_SHORT_OR_OVER;
     };
   }
-
-  /** The worse of two exit codes of judged jobs, or of a job that could not be read. */
-  static int worse(int a, int b) {
-    return rank(a) >= rank(b) ? a : b;
-  }
-
-  private static int rank(int code) {
-    return switch (code) {
-      case WITHIN_LIMITS -> 0;
-      case NOT_ASSESSED -> 1;
-      case MARGIN_SHORT_OR_OVER -> 2;
-      case INPUT_OR_USAGE -> 3;
-      default -> 4;
-    };
-  }
 }

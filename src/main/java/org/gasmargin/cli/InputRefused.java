@@ -1,6 +1,7 @@
 package org.gasmargin.cli;
 
 import java.util.List;
+import org.gasmargin.yaml.Issue;
 
 /** Input that the user can put right; ends the command with one line for each problem. */
 final class InputRefused extends RuntimeException {
@@ -11,6 +12,11 @@ final class InputRefused extends RuntimeException {
   InputRefused(List<String> lines) {
     super(String.join("\n", lines));
     this.lines = List.copyOf(lines);
+  }
+
+  /** A line for each issue of a file. */
+  static InputRefused with(List<Issue> issues) {
+    return new InputRefused(issues.stream().map(Issue::toString).toList());
   }
 
   /** One line for each problem. */

@@ -25,7 +25,6 @@ import org.gasmargin.rules.RulePackErrors;
 import org.gasmargin.rules.RulePackLoader;
 import org.gasmargin.vessel.MaterialCatalogue;
 import org.gasmargin.worksheet.WorksheetContent;
-import org.gasmargin.yaml.Issue;
 
 /**
  * The way of one job from its file to a judged result.
@@ -70,7 +69,7 @@ record JobCheck(WorksheetContent content) {
       return loading.join();
     } catch (CompletionException failed) {
       if (failed.getCause() instanceof RulePackErrors refused) {
-        throw new InputRefused(refused.issues().stream().map(Issue::toString).toList());
+        throw InputRefused.with(refused.issues());
       }
       throw failed;
     }
@@ -82,7 +81,7 @@ record JobCheck(WorksheetContent content) {
               new GasCatalogue(), MaterialCatalogue.load(), RulePackLoader.builtInNames())
           .read(file);
     } catch (JobErrors errors) {
-      throw new InputRefused(errors.issues().stream().map(Issue::toString).toList());
+      throw InputRefused.with(errors.issues());
     }
   }
 

@@ -8,7 +8,6 @@ import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import org.gasmargin.worksheet.ResultJson;
 import org.gasmargin.worksheet.SeriesCsv;
 import org.gasmargin.worksheet.Worksheet;
 import org.gasmargin.worksheet.WorksheetContent;
@@ -25,15 +24,17 @@ record JobOutput(Path job, Path folder, boolean withPdf) {
   /**
    * Writes the files together.
    *
+   * @param content for the worksheet and the series
+   * @param result the result as JSON
    * @return the files written
    * @throws InputRefused if the folder cannot be written
    */
-  List<Path> write(WorksheetContent content) {
+  List<Path> write(WorksheetContent content, String result) {
     Map<String, byte[]> files = new LinkedHashMap<>();
     if (withPdf) {
       files.put(stem() + ".pdf", pdf(content));
     }
-    files.put(stem() + ".json", utf8(ResultJson.text(content) + "\n"));
+    files.put(stem() + ".json", utf8(result + "\n"));
     files.put(stem() + "-series.csv", utf8(SeriesCsv.text(content)));
     try {
       return new OutputFolder(folder).write(files);

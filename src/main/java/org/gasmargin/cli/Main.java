@@ -8,12 +8,14 @@ import picocli.CommandLine.IExecutionExceptionHandler;
 import picocli.CommandLine.IParameterExceptionHandler;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.ScopeType;
 import picocli.CommandLine.Spec;
 import picocli.CommandLine.UnmatchedArgumentException;
 
 /** The program's entry: commands, and what happens to errors. */
 @Command(
     name = "gasmargin",
+    scope = ScopeType.INHERIT,
     mixinStandardHelpOptions = true,
     versionProvider = ProgramVersion.class,
     subcommands = {CheckCommand.class},

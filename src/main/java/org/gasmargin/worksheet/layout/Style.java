@@ -47,11 +47,6 @@ public record Style(boolean bold, float size, float gray) {
     return new Style(true, size, gray);
   }
 
-  /** The same in another grey. */
-  public Style inGray(float other) {
-    return new Style(bold, size, other);
-  }
-
   /** Distance from one baseline to the next, pt. */
   public float lineHeight() {
     return size * 1.28f;
